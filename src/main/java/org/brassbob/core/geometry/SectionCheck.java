@@ -1,0 +1,223 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+package org.brassbob.core.geometry;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+import org.brassbob.core.geometry.SpaceShape.Loop;
+import org.brassbob.core.geometry.SpaceShape.Point;
+import org.brassbob.core.geometry.SpaceShape.Station;
+
+/**
+ * Decides whether sections describe a solid, and turns them into strips: the part of one loop between two stations, all running the
+ * same way round. A loop inside another is a hole in it (inside a hole, solid again), and its strip runs the other way.
+ */
+final class SectionCheck {
+    /** Below this a loop has no area (m2). */
+    private static final double NO_AREA = 1e-12;
+
+    private final SpaceShape shape;
+
+    private SectionCheck(SpaceShape shape) {
+        this.shape = shape;
+    }
+
+    /**
+     * The part of a loop between two stations.
+     *
+     * @param aftX x of the after station
+     * @param forwardX x of the forward station
+     * @param aft its points at the after station
+     * @param forward as many points at the forward station
+     */
+    record Strip(double aftX, double forwardX, List<Point> aft, List<Point> forward) {}
+
+    static List<Strip> check(SpaceShape shape) throws ShapeException {
+        return new SectionCheck(shape).strips();
+    }
+
+    private List<Strip> strips() throws ShapeException {
+        List<Station> stations = shape.stations();
+        if (stations.size() < 2) {
+            throw new ShapeException(0, "one station only; expected two or more");
+        }
+        for (int i = 0; i < stations.size(); i++) {
+            checkStation(i);
+        }
+        List<Strip> strips = new ArrayList<>();
+        for (int i = 0; i + 1 < stations.size(); i++) {
+            if (stations.get(i).x() < stations.get(i + 1).x()) {
+                strips.addAll(between(i));
+            }
+        }
+        return strips;
+    }
+
+    private void checkStation(int i) throws ShapeException {
+        Station station = shape.stations().get(i);
+        checkPosition(i);
+        if (station.loops().isEmpty()) {
+            throw new ShapeException(i, "no loop at x = " + station.x() + "; expected one or more");
+        }
+        Map<Integer, Loop> byNumber = new TreeMap<>();
+        for (Loop loop : station.loops()) {
+            if (byNumber.put(loop.number(), loop) != null) {
+                throw new ShapeException(i, where(i, loop.number()) + " is given twice; expected it once");
+            }
+            if (loop.points().size() < 3) {
+                throw new ShapeException(
+                        i, where(i, loop.number()) + " has " + loop.points().size() + " points; expected 3 or more");
+            }
+            if (Section.crossesItself(loop.points())) {
+                throw new ShapeException(i, where(i, loop.number()) + " crosses itself; expected a simple outline");
+            }
+            checkJoinsSomething(i, loop);
+        }
+        checkApart(i, station.loops());
+    }
+
+    private void checkPosition(int i) throws ShapeException {
+        List<Station> stations = shape.stations();
+        double x = stations.get(i).x();
+        if (i > 0 && stations.get(i - 1).x() > x) {
+            throw new ShapeException(
+                    i, "x = " + x + " after " + stations.get(i - 1).x() + "; expected ascending x");
+        }
+        boolean jump = i > 0 && stations.get(i - 1).x() == x;
+        if (jump && (i == 1 || i == stations.size() - 1)) {
+            throw new ShapeException(i, "two stations at the end x = " + x + "; expected one");
+        }
+        if (jump && i > 1 && stations.get(i - 2).x() == x) {
+            throw new ShapeException(i, "three stations at x = " + x + "; expected two at the most");
+        }
+    }
+
+    /** A loop needs its number at a neighbouring station; otherwise it is a sheet and the shape is open. */
+    private void checkJoinsSomething(int i, Loop loop) throws ShapeException {
+        if (!hasNeighbour(i, i - 1, loop.number()) && !hasNeighbour(i, i + 1, loop.number())) {
+            throw new ShapeException(
+                    i,
+                    where(i, loop.number()) + " joins no loop " + loop.number() + " at a neighbouring station: open");
+        }
+    }
+
+    private boolean hasNeighbour(int i, int j, int number) {
+        List<Station> stations = shape.stations();
+        return j >= 0
+                && j < stations.size()
+                && stations.get(j).x() != stations.get(i).x()
+                && stations.get(j).loops().stream().anyMatch(l -> l.number() == number);
+    }
+
+    private void checkApart(int i, List<Loop> loops) throws ShapeException {
+        for (int a = 0; a < loops.size(); a++) {
+            for (int b = a + 1; b < loops.size(); b++) {
+                if (Section.crossEachOther(loops.get(a).points(), loops.get(b).points())) {
+                    throw new ShapeException(
+                            i,
+                            where(i, loops.get(a).number()) + " crosses loop "
+                                    + loops.get(b).number() + "; expected loops apart or one inside the other");
+                }
+            }
+        }
+    }
+
+    private List<Strip> between(int i) throws ShapeException {
+        Station aft = shape.stations().get(i);
+        Station forward = shape.stations().get(i + 1);
+        List<Strip> raw = new ArrayList<>();
+        List<Integer> numbers = new ArrayList<>();
+        for (Loop loop : aft.loops()) {
+            for (Loop next : forward.loops()) {
+                if (next.number() == loop.number()) {
+                    raw.add(strip(i, aft.x(), forward.x(), loop, next));
+                    numbers.add(loop.number());
+                }
+            }
+        }
+        List<Strip> turned = new ArrayList<>();
+        for (int a = 0; a < raw.size(); a++) {
+            turned.add(depth(i, raw, numbers, a) % 2 == 0 ? raw.get(a) : reversed(raw.get(a)));
+        }
+        return turned;
+    }
+
+    private Strip strip(int i, double aftX, double forwardX, Loop loop, Loop next) throws ShapeException {
+        List<Point> a = loop.points();
+        List<Point> b = next.points();
+        if (a.size() != b.size()) {
+            throw new ShapeException(
+                    i + 1,
+                    where(i + 1, next.number()) + " has " + b.size() + " points; expected " + a.size()
+                            + " as at the station before");
+        }
+        double aftArea = Section.area(a);
+        double forwardArea = Section.area(b);
+        boolean flatAft = Math.abs(aftArea) < NO_AREA;
+        boolean flatForward = Math.abs(forwardArea) < NO_AREA;
+        if (flatAft && flatForward) {
+            throw new ShapeException(
+                    i + 1, where(i + 1, next.number()) + " has no area here nor at the station before: degenerate");
+        }
+        if (!flatAft && !flatForward && aftArea * forwardArea < 0) {
+            throw new ShapeException(
+                    i + 1, where(i + 1, next.number()) + " runs the other way round than at the station before");
+        }
+        Strip strip = new Strip(aftX, forwardX, a, b);
+        if (Section.crossesItself(middle(strip))) {
+            throw new ShapeException(
+                    i + 1,
+                    where(i + 1, next.number()) + " does not match the station before point by point: "
+                            + "the skin crosses itself between them");
+        }
+        return (flatAft ? forwardArea : aftArea) > 0 ? strip : reversed(strip);
+    }
+
+    /** How many other loops this one lies in, which must be the same wherever the loops have an area. */
+    private int depth(int i, List<Strip> strips, List<Integer> numbers, int a) throws ShapeException {
+        int depth = 0;
+        for (int b = 0; b < strips.size(); b++) {
+            if (b == a) {
+                continue;
+            }
+            List<Point> inner = middle(strips.get(a));
+            List<Point> outer = middle(strips.get(b));
+            if (Section.crossEachOther(inner, outer)) {
+                throw new ShapeException(
+                        i + 1,
+                        where(i + 1, numbers.get(a)) + " and loop " + numbers.get(b)
+                                + " cross between this station and the one before");
+            }
+            if (Section.liesWithin(inner, outer) && Math.abs(Section.area(inner)) < Math.abs(Section.area(outer))) {
+                depth++;
+            }
+        }
+        return depth;
+    }
+
+    private static List<Point> middle(Strip strip) {
+        List<Point> middle = new ArrayList<>();
+        for (int i = 0; i < strip.aft().size(); i++) {
+            Point a = strip.aft().get(i);
+            Point b = strip.forward().get(i);
+            middle.add(new Point((a.y() + b.y()) / 2, (a.z() + b.z()) / 2));
+        }
+        return middle;
+    }
+
+    private static Strip reversed(Strip strip) {
+        return new Strip(strip.aftX(), strip.forwardX(), reversed(strip.aft()), reversed(strip.forward()));
+    }
+
+    private static List<Point> reversed(List<Point> points) {
+        List<Point> turned = new ArrayList<>(points);
+        Collections.reverse(turned);
+        return turned;
+    }
+
+    private String where(int station, int loop) {
+        return "loop " + loop + " at x = " + shape.stations().get(station).x();
+    }
+}
