@@ -1,0 +1,195 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+package org.brassbob.core.condition;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import org.brassbob.core.contents.TankState;
+import org.brassbob.core.contents.VolumeWorking;
+import org.brassbob.core.notice.Notice;
+import org.brassbob.core.notice.NoticeCode;
+import org.brassbob.core.round.Reading;
+import org.brassbob.core.vessel.Tank;
+import org.brassbob.core.vessel.Use;
+import org.brassbob.core.vessel.Vessel;
+import org.brassbob.core.working.Step;
+import org.brassbob.core.working.Step.Input;
+import org.brassbob.core.working.Working;
+
+/** From the loads to the figures of each tank: losses, shares, ranks and notes. */
+final class FiguresMaker {
+    /**
+     * A tank may be left out where its free-surface moment over the least displacement is below this (m; 2008 IS Code part B 3.1.12,
+     * from memory). The code's moment is that at 30° of heel; the upright moment used here is the greater, and the light ship stands
+     * for the least displacement, so no tank is called negligible that the code would count.
+     */
+    private static final double NEGLIGIBLE_GM = 0.01;
+
+    private final Vessel vessel;
+    private final Totals totals;
+    private final Working working;
+    private final double trim;
+    private final double listDeg;
+
+    FiguresMaker(Vessel vessel, Totals totals, double trim, double listDeg, Working working) {
+        this.vessel = vessel;
+        this.totals = totals;
+        this.trim = trim;
+        this.listDeg = listDeg;
+        this.working = working;
+    }
+
+    List<TankFigures> of(List<TankLoad> loads) {
+        int[] ranks = ranks(loads);
+        List<TankFigures> figures = new ArrayList<>(loads.size());
+        for (int i = 0; i < loads.size(); i++) {
+            TankLoad load = loads.get(i);
+            figures.add(figures(load, ranks[i]));
+            if (working.recording()) {
+                record(load);
+            }
+        }
+        return figures;
+    }
+
+    /** 1 for the largest moment by the code; of equal ones the earlier in the walk comes first; 0 for none. */
+    private static int[] ranks(List<TankLoad> loads) {
+        int[] ranks = new int[loads.size()];
+        List<Integer> slack = new ArrayList<>();
+        for (int i = 0; i < ranks.length; i++) {
+            if (loads.get(i).fsmByCode() > 0) {
+                slack.add(i);
+            }
+        }
+        slack.sort(Comparator.comparingDouble((Integer i) -> -loads.get(i).fsmByCode()));
+        for (int rank = 0; rank < slack.size(); rank++) {
+            ranks[slack.get(rank)] = rank + 1;
+        }
+        return ranks;
+    }
+
+    private TankFigures figures(TankLoad load, int rank) {
+        Tank tank = load.tank();
+        double fsm = load.fsmByCode();
+        boolean stale = isStale(load);
+        return new TankFigures(
+                tank,
+                load.reading(),
+                load.ageHours(),
+                load.volume(),
+                100 * load.volume() / tank.capacity(),
+                load.liquid().density(),
+                load.mass(),
+                load.contents().lcg(),
+                load.contents().tcg(),
+                load.contents().vcg(),
+                load.shownState(),
+                stale,
+                load.fsmAsSounded(),
+                fsm,
+                fsm / totals.mass,
+                totals.fsmByCode > 0 ? 100 * fsm / totals.fsmByCode : 0,
+                rank,
+                rank > 0 && fsm / vessel.lightship().mass() < NEGLIGIBLE_GM,
+                notes(load, stale));
+    }
+
+    private boolean isStale(TankLoad load) {
+        return load.ageHours() > vessel.policy().staleAfterHours(load.tank());
+    }
+
+    private List<Notice> notes(TankLoad load, boolean stale) {
+        Tank tank = load.tank();
+        List<Notice> notes = new ArrayList<>(load.range().notices());
+        if (load.reading() == null) {
+            notes.add(
+                    tank.isVoid()
+                            ? Notice.of(NoticeCode.VOID_NOT_READ, tank.id())
+                            : Notice.of(NoticeCode.READING_MISSING, tank.id(), load.volume()));
+        } else if (load.range().isInterval()) {
+            notes.add(intervalNote(load));
+        }
+        if (stale) {
+            double limit = vessel.policy().staleAfterHours(tank);
+            notes.add(Notice.of(NoticeCode.READING_STALE, tank.id(), load.ageHours(), limit));
+        }
+        Notice ofLiquid = load.liquid().notice();
+        if (ofLiquid != null && load.volume() > 0) {
+            notes.add(ofLiquid);
+        }
+        if (tank.isVoid() && load.shownState() != TankState.EMPTY && load.volume() > 0) {
+            notes.add(Notice.of(NoticeCode.VOID_NOT_DRY, tank.id(), load.volume()));
+        }
+        if (load.volume() > tank.fillLimit() * (1 + 1e-9) && !tank.isVoid()) {
+            notes.add(Notice.of(NoticeCode.ABOVE_FILL_LIMIT, tank.id(), load.volume(), tank.fillLimit()));
+        }
+        if (load.water() > 0) {
+            notes.add(Notice.of(NoticeCode.FREE_WATER, tank.id(), load.water(), load.waterDensity()));
+        }
+        return notes;
+    }
+
+    private static Notice intervalNote(TankLoad load) {
+        boolean dry = load.range().low() == 0;
+        return dry
+                ? Notice.of(NoticeCode.PIPE_DRY, load.tank().id(), load.range().high(), load.volume())
+                : Notice.of(
+                        NoticeCode.PIPE_BRIM_FULL,
+                        load.tank().id(),
+                        load.range().low(),
+                        load.volume());
+    }
+
+    private void record(TankLoad load) {
+        Tank tank = load.tank();
+        String id = tank.id();
+        Reading reading = load.reading();
+        working.step(
+                reading == null
+                        ? Step.of(
+                                id,
+                                "volume_m3",
+                                "no reading: the level that gives the lowest corrected GM",
+                                load.volume())
+                        : VolumeWorking.volume(load.model(), reading, load.volume(), trim, listDeg));
+        VolumeWorking.contents(load.model(), load.volume(), trim, load.contents())
+                .forEach(working::step);
+        Input density = Input.figure(id, "density_t_m3", load.liquid().density());
+        Input secondMoment =
+                Input.figure(id, "second_moment_m4", load.contents().secondMoment());
+        working.step(Step.of(
+                id,
+                "density_t_m3",
+                tank.liquid().expansion().code() + " expansion from "
+                        + tank.liquid().density() + " t/m3",
+                load.liquid().density()));
+        working.step(Step.of(
+                id,
+                "mass_t",
+                load.water() > 0 ? "volume·density, free water at its own" : "volume·density",
+                load.mass(),
+                Input.figure(id, "volume_m3", load.volume()),
+                density));
+        working.step(Step.of(
+                id,
+                "fsm_as_sounded_tm",
+                "density·second moment where slack",
+                load.fsmAsSounded(),
+                density,
+                secondMoment));
+        working.step(Step.of(id, "fsm_by_code_tm", codeRule(tank), load.fsmByCode(), density, secondMoment));
+        working.step(Step.of(
+                id,
+                "gm_loss_m",
+                "free-surface moment by the code / displacement",
+                load.fsmByCode() / totals.mass,
+                Input.figure(id, "fsm_by_code_tm", load.fsmByCode()),
+                Input.figure("ship", "displacement_t", totals.mass)));
+    }
+
+    private static String codeRule(Tank tank) {
+        return tank.use() == Use.FIXED
+                ? "fixed level: at its level (2008 IS Code part B 3.1.3)"
+                : "consumable: greatest between residue and the lesser of fill limit and 98 % (2008 IS Code part B 3.1.3)";
+    }
+}

@@ -1,0 +1,108 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+package org.brassbob.core.contents;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.brassbob.core.round.Reading;
+import org.brassbob.core.table.Axis;
+import org.brassbob.core.table.SoundingTable;
+import org.brassbob.core.table.VolumeTable;
+import org.brassbob.core.vessel.Tank;
+import org.brassbob.core.working.Step;
+import org.brassbob.core.working.Step.Input;
+
+/** Names what a tank's volume and centroid were taken from: the reading, and the rows of the tables or the shape. */
+public final class VolumeWorking {
+    private VolumeWorking() {}
+
+    /** The step from a reading to a volume. */
+    public static Step volume(TankModel model, Reading reading, double volume, double trim, double listDeg) {
+        Tank tank = model.tank();
+        List<Input> inputs = new ArrayList<>();
+        if (reading.kind().hasValue()) {
+            inputs.add(Input.from(
+                    reading.kind().code(), reading.value(), reading.origin().at(0)));
+        }
+        return switch (reading.kind()) {
+            case SOUNDING, ULLAGE -> sounded(model, reading, volume, trim, listDeg, inputs);
+            case VOLUME -> step(tank, "as stated", volume, inputs);
+            case PERCENT -> {
+                inputs.add(
+                        Input.from("capacity_m3", tank.capacity(), tank.origin().at(0)));
+                yield step(tank, "per cent of capacity", volume, inputs);
+            }
+            case MASS -> {
+                inputs.add(Input.figure(tank.id(), "density_t_m3", reading.value() / volume));
+                yield step(tank, "mass / density", volume, inputs);
+            }
+            case EMPTY -> step(tank, "reported empty", volume, inputs);
+            case FULL -> step(tank, "reported full: capacity", volume, inputs);
+            case NOT_TAKEN -> step(tank, "not taken", volume, inputs);
+        };
+    }
+
+    private static Step sounded(
+            TankModel model, Reading reading, double volume, double trim, double listDeg, List<Input> inputs) {
+        Tank tank = model.tank();
+        inputs.add(Input.figure("ship", "trim_for_readings_m", trim));
+        inputs.add(Input.figure("ship", "list_for_readings_deg", listDeg));
+        double sounding = ReadingVolume.sounding(tank, reading);
+        SoundingTable table = tank.soundings();
+        if (table != null && (model.tableCovers(sounding, trim, listDeg) || !model.hasSoundableShape())) {
+            double argument = table.argument() == SoundingTable.Argument.SOUNDING || tank.pipe() == null
+                    ? sounding
+                    : tank.pipe().complement(sounding);
+            addRows(inputs, table, argument, trim, listDeg);
+            return step(tank, "sounding table, read linearly in reading, trim and heel", volume, inputs);
+        }
+        return step(tank, "shape, below the plane through the pipe at this trim and list", volume, inputs);
+    }
+
+    private static void addRows(List<Input> inputs, SoundingTable table, double argument, double trim, double listDeg) {
+        for (int r : cells(table.readings(), argument)) {
+            for (int t : cells(table.trims(), trim)) {
+                for (int h : cells(table.heels(), listDeg)) {
+                    int node = table.node(r, t, h);
+                    inputs.add(Input.from(
+                            "volume_m3", table.volume(node), table.origin().at(node)));
+                }
+            }
+        }
+    }
+
+    private static int[] cells(Axis axis, double at) {
+        int cell = axis.cell(at);
+        double fraction = axis.fraction(at, cell);
+        if (fraction == 0) {
+            return new int[] {cell};
+        }
+        return fraction == 1 ? new int[] {cell + 1} : new int[] {cell, cell + 1};
+    }
+
+    /** The steps from a volume to its centroid (vcg) and second moment. */
+    public static List<Step> contents(TankModel model, double volume, double trim, VolumeTable.Entry entry) {
+        Tank tank = model.tank();
+        List<Input> inputs = new ArrayList<>();
+        inputs.add(Input.figure(tank.id(), "volume_m3", volume));
+        VolumeTable table = tank.volumes();
+        String rule = "shape, for this volume at the trim of the readings, without list";
+        if (table != null) {
+            rule = "volume table, read linearly";
+            for (int row : cells(table.volumes(), volume)) {
+                inputs.add(Input.from(
+                        "volume_m3", table.volumes().value(row), table.origin().at(row)));
+            }
+        } else {
+            inputs.add(Input.figure("ship", "trim_for_readings_m", trim));
+        }
+        return List.of(
+                new Step(tank.id() + "/lcg_m", rule, entry.lcg(), inputs),
+                new Step(tank.id() + "/tcg_m", rule, entry.tcg(), inputs),
+                new Step(tank.id() + "/vcg_m", rule, entry.vcg(), inputs),
+                new Step(tank.id() + "/second_moment_m4", rule, entry.secondMoment(), inputs));
+    }
+
+    private static Step step(Tank tank, String rule, double volume, List<Input> inputs) {
+        return new Step(tank.id() + "/volume_m3", rule, volume, inputs);
+    }
+}
