@@ -1,0 +1,16 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+package org.brassbob.core.tabulate;
+
+import org.brassbob.core.table.Axis;
+
+/**
+ * How finely a tank is tabulated.
+ *
+ * @param trims trims of the sounding table (m)
+ * @param heels heels of the sounding table (°)
+ * @param readings about how many readings it has at the most
+ */
+public record CalibrationGrid(Axis trims, Axis heels, int readings) {
+    /** What a coaster's booklet commonly carries. */
+    public static final CalibrationGrid USUAL = new CalibrationGrid(Axis.of(-1, 0, 1, 2, 3), Axis.of(-2, 0, 2), 40);
+}
