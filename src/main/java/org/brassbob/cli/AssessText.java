@@ -4,20 +4,27 @@ package org.brassbob.cli;
 import java.time.OffsetDateTime;
 import java.time.format.DateTimeFormatter;
 import java.util.Comparator;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Set;
 import org.brassbob.core.condition.Assessment;
 import org.brassbob.core.condition.Condition;
 import org.brassbob.core.condition.Margin;
 import org.brassbob.core.condition.TankFigures;
 import org.brassbob.core.contents.TankState;
 import org.brassbob.core.notice.Notice;
+import org.brassbob.core.notice.NoticeCode;
+import org.brassbob.core.notice.Severity;
 import org.brassbob.core.round.Reading;
 import org.brassbob.core.round.ReadingKind;
 
 /** An assessment as a page of text, the verdict last, where the eye of somebody at a terminal is. */
 final class AssessText {
     private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("d MMM yyyy HH:mm xxx", Locale.ENGLISH);
+
+    /** From so many on, notes of one kind are told once. */
+    private static final int MANY = 4;
 
     private final Assessment assessment;
     private final StringBuilder text = new StringBuilder();
@@ -154,10 +161,24 @@ final class AssessText {
             return;
         }
         line("TO KNOW");
+        Set<NoticeCode> told = EnumSet.noneOf(NoticeCode.class);
         for (Notice notice : assessment.notices()) {
-            line("  %-8s%s: %s", notice.severity().code(), notice.about(), notice.text());
+            List<Notice> alike = assessment.notices().stream()
+                    .filter(n -> n.code() == notice.code())
+                    .toList();
+            if (alike.size() < MANY || notice.severity() != Severity.NOTE) {
+                line("  %-8s%s: %s", notice.severity().code(), about(notice), notice.text());
+            } else if (told.add(notice.code())) {
+                line(
+                        "  %-8s%d tanks alike, of which %s: %s",
+                        notice.severity().code(), alike.size(), about(notice), notice.text());
+            }
         }
         line("");
+    }
+
+    private String about(Notice notice) {
+        return assessment.tank(notice.about()).map(t -> t.tank().name()).orElse(notice.about());
     }
 
     private void verdict() {

@@ -4,7 +4,6 @@ package org.brassbob.core.condition;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import org.brassbob.core.contents.TankState;
 import org.brassbob.core.contents.VolumeWorking;
 import org.brassbob.core.notice.Notice;
 import org.brassbob.core.notice.NoticeCode;
@@ -106,7 +105,7 @@ final class FiguresMaker {
                     tank.isVoid()
                             ? Notice.of(NoticeCode.VOID_NOT_READ, tank.id())
                             : Notice.of(NoticeCode.READING_MISSING, tank.id(), load.volume()));
-        } else if (load.range().isInterval()) {
+        } else if (load.intervalMatters()) {
             notes.add(intervalNote(load));
         }
         if (stale) {
@@ -117,7 +116,7 @@ final class FiguresMaker {
         if (ofLiquid != null && load.volume() > 0) {
             notes.add(ofLiquid);
         }
-        if (tank.isVoid() && load.shownState() != TankState.EMPTY && load.volume() > 0) {
+        if (tank.isVoid() && load.range().low() > tank.residue()) {
             notes.add(Notice.of(NoticeCode.VOID_NOT_DRY, tank.id(), load.volume()));
         }
         if (load.volume() > tank.fillLimit() * (1 + 1e-9) && !tank.isVoid()) {

@@ -45,6 +45,11 @@ final class TankLoad {
         return reading == null && !tank().isVoid();
     }
 
+    /** Whether the reading leaves a choice that tells: between two volumes that both count as empty there is none worth a word. */
+    boolean intervalMatters() {
+        return range.isInterval() && model.stateOf(range.high()) != TankState.EMPTY;
+    }
+
     /** Works out the volumes that the reading allows at a trim (m) and list (°), and starts from the least. */
     void read(double trim, double listDeg) {
         Reading taken = reading;
