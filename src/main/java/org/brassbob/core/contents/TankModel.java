@@ -144,8 +144,7 @@ public final class TankModel {
         }
         NetShape solid = requiredShape();
         double least = NEXT_TO_NOTHING * solid.capacity();
-        Immersed held =
-                solid.holding(Attitude.of(trim, lbp, 0), Math.min(Math.max(volume, least), solid.capacity() - least));
+        Immersed held = solid.holding(Attitude.of(trim, lbp, 0), Math.max(volume, least));
         return new VolumeTable.Entry(
                 held.lcg(), held.tcg(), held.vcg(), held.surface().transverse());
     }
