@@ -25,6 +25,12 @@ public final class TankModel {
     private final double lbp;
     private final double greatestInTable;
 
+    /** Rounds are worked out many times at one trim, and the search takes longer than all else of a tank. */
+    private volatile @Nullable AtTrim lastGreatest;
+
+    /** A second moment (m4) at a trim (m). */
+    private record AtTrim(double trim, double secondMoment) {}
+
     /**
      * A tank with its net shape.
      *
@@ -157,7 +163,14 @@ public final class TankModel {
         if (tank.volumes() != null) {
             return greatestInTable;
         }
-        return SurfaceRange.greatest(requiredShape(), Attitude.of(trim, lbp, 0), tank.residue(), codeLimit(tank));
+        AtTrim known = lastGreatest;
+        if (known == null || known.trim != trim) {
+            Attitude attitude = Attitude.of(trim, lbp, 0);
+            double greatest = SurfaceRange.greatest(requiredShape(), attitude, tank.residue(), codeLimit(tank));
+            known = new AtTrim(trim, greatest);
+            lastGreatest = known;
+        }
+        return known.secondMoment;
     }
 
     /**
