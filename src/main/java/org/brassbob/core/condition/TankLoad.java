@@ -140,6 +140,21 @@ final class TankLoad {
         return contents;
     }
 
+    /** Centroid of all that is in it, m forward of the aft perpendicular. */
+    double lcg() {
+        return water > 0 ? momentX / mass : contents.lcg();
+    }
+
+    /** Centroid of all that is in it, m to starboard of the centreline. */
+    double tcg() {
+        return water > 0 ? momentY / mass : contents.tcg();
+    }
+
+    /** Centroid of all that is in it, m above the baseline. */
+    double vcg() {
+        return water > 0 ? momentZ / mass : contents.vcg();
+    }
+
     /** The state as shown: unknown where there is no reading. */
     TankState shownState() {
         return reading == null ? TankState.UNKNOWN : state;

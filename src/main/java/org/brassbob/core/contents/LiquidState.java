@@ -17,7 +17,7 @@ import org.jspecify.annotations.Nullable;
  * @param notice what must be told about it
  */
 public record LiquidState(double density, @Nullable Notice notice) {
-    /** What air takes off a density when masses are stated in air (t/m3; API MPMS 11.1 practice, from memory). */
+    /** What air takes off a density at 15 °C when masses are stated in air (t/m3; API MPMS 11.1 practice, from memory). */
     public static final double AIR_BUOYANCY = 0.0011;
 
     /** The liquid in a tank, as the reading states it or as the ship's data do. */
@@ -25,21 +25,22 @@ public record LiquidState(double density, @Nullable Notice notice) {
         Liquid liquid = tank.liquid();
         Double stated = reading == null ? null : reading.density();
         Double temperature = reading == null ? null : reading.temperatureC();
-        double density = stated == null ? liquid.density() : stated;
+        double given = stated == null ? liquid.density() : stated;
+        double density = massIn == MassIn.AIR ? given - AIR_BUOYANCY : given;
         Notice notice = null;
         if (liquid.expansion() != Expansion.NONE) {
             if (temperature == null) {
                 notice = reading == null ? null : Notice.of(NoticeCode.NO_TEMPERATURE, tank.id());
             } else {
-                double factor = factor(liquid.expansion(), density, temperature);
+                double factor = factor(liquid.expansion(), given, temperature);
                 if (Double.isNaN(factor)) {
-                    notice = Notice.of(NoticeCode.DENSITY_OUT_OF_RANGE, tank.id(), density);
+                    notice = Notice.of(NoticeCode.DENSITY_OUT_OF_RANGE, tank.id(), given);
                 } else {
                     density *= factor;
                 }
             }
         }
-        return new LiquidState(massIn == MassIn.AIR ? density - AIR_BUOYANCY : density, notice);
+        return new LiquidState(density, notice);
     }
 
     private static double factor(Expansion expansion, double density15, double temperatureC) {

@@ -22,12 +22,13 @@ public final class ReadingVolume {
      * @param trim m
      * @param listDeg °
      * @param density of the liquid (t/m3), for a reading in tonnes
+     * @throws IllegalStateException if the tank has neither table nor shape that could turn it into a volume, which a checked round
+     *     never has
      */
     public static VolumeRange of(TankModel model, Reading reading, double trim, double listDeg, double density) {
         Tank tank = model.tank();
         return switch (reading.kind()) {
-            case SOUNDING -> sounded(model, reading.value(), reading.value(), trim, listDeg);
-            case ULLAGE -> sounded(model, sounding(tank, reading), reading.value(), trim, listDeg);
+            case SOUNDING, ULLAGE -> sounded(model, sounding(model, reading), reading.value(), trim, listDeg);
             case VOLUME -> stated(tank, reading.value());
             case PERCENT -> stated(tank, reading.value() * tank.capacity() / 100);
             case MASS -> stated(tank, reading.value() / density);
@@ -38,11 +39,13 @@ public final class ReadingVolume {
     }
 
     /** The sounding (m) that a sounding or ullage states. */
-    static double sounding(Tank tank, Reading reading) {
-        Pipe pipe = tank.pipe();
-        return reading.kind() == ReadingKind.ULLAGE && pipe != null
-                ? pipe.complement(reading.value())
-                : reading.value();
+    static double sounding(TankModel model, Reading reading) {
+        boolean ullage = reading.kind() == ReadingKind.ULLAGE;
+        if (ullage ? !model.canBeUllaged() : !model.canBeSounded()) {
+            throw new IllegalStateException("tank " + reading.tank() + " has nothing to turn this "
+                    + reading.kind().code() + " into a volume");
+        }
+        return ullage ? model.complement(reading.value()) : reading.value();
     }
 
     private static VolumeRange stated(Tank tank, double volume) {
@@ -55,7 +58,7 @@ public final class ReadingVolume {
 
     private static VolumeRange sounded(TankModel model, double sounding, double read, double trim, double listDeg) {
         double depth = Math.max(0, sounding);
-        double volume = model.volumeAtSounding(depth, trim, listDeg);
+        double volume = model.volumeAtSounding(Math.min(depth, model.brim()), trim, listDeg);
         if (depth > 0 && depth < model.brim() && model.tableCovers(depth, trim, listDeg)) {
             return VolumeRange.of(volume);
         }
@@ -71,7 +74,8 @@ public final class ReadingVolume {
             notices.add(Notice.of(NoticeCode.LONGER_THAN_PIPE, tank.id(), read, pipe.length()));
         }
         double depth = Math.max(0, sounding);
-        if (model.hasSoundingTable() && !model.tableCovers(depth, trim, listDeg)) {
+        boolean beyondItsLastUllage = pipe == null && sounding < 0;
+        if (model.hasSoundingTable() && (beyondItsLastUllage || !model.tableCovers(depth, trim, listDeg))) {
             addOutside(notices, model, read, volume, trim, listDeg);
         }
         boolean dry = sounding <= 0;

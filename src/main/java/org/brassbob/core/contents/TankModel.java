@@ -20,10 +20,19 @@ public final class TankModel {
     /** Below this share of capacity the centroid of the limit is given, since nothing has none. */
     private static final double NEXT_TO_NOTHING = 1e-6;
 
+    /** What two subtractions may do to a reading (m). */
+    private static final double ROUNDING = 1e-9;
+
     private final Tank tank;
     private final @Nullable NetShape shape;
     private final double lbp;
     private final double greatestInTable;
+
+    /** Rounds are worked out many times at one trim, and the search takes longer than all else of a tank. */
+    private volatile @Nullable AtTrim lastGreatest;
+
+    /** A second moment (m4) at a trim (m). */
+    private record AtTrim(double trim, double secondMoment) {}
 
     /**
      * A tank with its net shape.
@@ -61,42 +70,64 @@ public final class TankModel {
         return volume >= TankState.FULL_SHARE * tank.capacity() ? TankState.FULL : TankState.SLACK;
     }
 
-    /** Whether soundings and ullages can be turned into volumes. */
+    /** Whether soundings can be turned into volumes. */
     public boolean canBeSounded() {
-        return canUseTable(Argument.SOUNDING) || (shape != null && tank.pipe() != null);
+        SoundingTable table = tank.soundings();
+        return hasSoundableShape() || (table != null && (table.argument() == Argument.SOUNDING || tank.pipe() != null));
+    }
+
+    /** Whether ullages can be turned into volumes. */
+    public boolean canBeUllaged() {
+        SoundingTable table = tank.soundings();
+        return hasSoundableShape() || (table != null && (table.argument() == Argument.ULLAGE || tank.pipe() != null));
+    }
+
+    /** The sounding (m) that belongs to an ullage, or the ullage that belongs to a sounding. */
+    public double complement(double reading) {
+        return height() - reading;
+    }
+
+    /**
+     * What a sounding and an ullage add up to (m): the reference height of the pipe. A tank with an ullage table and no pipe is
+     * only ever ullaged; there the table's last ullage stands for the bottom.
+     */
+    private double height() {
+        Pipe pipe = tank.pipe();
+        SoundingTable table = tank.soundings();
+        if (pipe != null) {
+            return pipe.length();
+        }
+        return table != null && table.argument() == Argument.ULLAGE
+                ? table.readings().last()
+                : Double.POSITIVE_INFINITY;
     }
 
     /** The depth of the pipe that a sounding can reach in the tables or the tank (m): from there on it reads brim-full. */
     public double brim() {
-        Pipe pipe = tank.pipe();
         SoundingTable table = tank.soundings();
-        double length = pipe == null ? Double.POSITIVE_INFINITY : pipe.length();
         if (shape == null && table != null) {
             double last = table.argument() == Argument.SOUNDING
                     ? table.readings().last()
-                    : length - table.readings().first();
-            return Math.min(length, last);
+                    : complement(table.readings().first());
+            return Math.min(height(), last);
         }
-        return length;
+        return height();
     }
 
     /** Whether the table reaches this sounding (m) at this trim (m) and list (°). */
     public boolean tableCovers(double sounding, double trim, double listDeg) {
         SoundingTable table = tank.soundings();
-        return table != null
-                && canUseTable(Argument.SOUNDING)
-                && table.covers(trim, listDeg)
-                && table.readings().covers(argument(table, sounding));
-    }
-
-    /** Whether there is a sounding table that soundings can be looked up in. */
-    public boolean hasSoundingTable() {
-        return canUseTable(Argument.SOUNDING);
+        return table != null && table.covers(trim, listDeg) && table.readings().covers(argument(table, sounding));
     }
 
     /** Whether it can be sounded by its shape. */
     public boolean hasSoundableShape() {
         return shape != null && tank.pipe() != null;
+    }
+
+    /** Whether soundings and ullages are looked up in a table first. */
+    public boolean hasSoundingTable() {
+        return tank.soundings() != null;
     }
 
     /**
@@ -123,14 +154,14 @@ public final class TankModel {
         return Math.min(volume, tank.capacity());
     }
 
-    private boolean canUseTable(Argument wanted) {
-        SoundingTable table = tank.soundings();
-        return table != null && (table.argument() == wanted || tank.pipe() != null);
-    }
-
-    private double argument(SoundingTable table, double sounding) {
-        Pipe pipe = tank.pipe();
-        return table.argument() == Argument.SOUNDING || pipe == null ? sounding : pipe.complement(sounding);
+    /** What a table is entered with for a sounding (m). An ullage worked back from a sounding must not miss the table's end by rounding. */
+    double argument(SoundingTable table, double sounding) {
+        if (table.argument() == Argument.SOUNDING) {
+            return sounding;
+        }
+        double ullage = complement(sounding);
+        double first = table.readings().first();
+        return Math.abs(ullage - first) < ROUNDING ? first : ullage;
     }
 
     /**
@@ -144,8 +175,7 @@ public final class TankModel {
         }
         NetShape solid = requiredShape();
         double least = NEXT_TO_NOTHING * solid.capacity();
-        Immersed held =
-                solid.holding(Attitude.of(trim, lbp, 0), Math.min(Math.max(volume, least), solid.capacity() - least));
+        Immersed held = solid.holding(Attitude.of(trim, lbp, 0), Math.max(volume, least));
         return new VolumeTable.Entry(
                 held.lcg(), held.tcg(), held.vcg(), held.surface().transverse());
     }
@@ -158,7 +188,14 @@ public final class TankModel {
         if (tank.volumes() != null) {
             return greatestInTable;
         }
-        return SurfaceRange.greatest(requiredShape(), Attitude.of(trim, lbp, 0), tank.residue(), codeLimit(tank));
+        AtTrim known = lastGreatest;
+        if (known == null || known.trim != trim) {
+            Attitude attitude = Attitude.of(trim, lbp, 0);
+            double greatest = SurfaceRange.greatest(requiredShape(), attitude, tank.residue(), codeLimit(tank));
+            known = new AtTrim(trim, greatest);
+            lastGreatest = known;
+        }
+        return known.secondMoment;
     }
 
     /**

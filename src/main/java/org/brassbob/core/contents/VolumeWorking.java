@@ -46,12 +46,10 @@ public final class VolumeWorking {
         Tank tank = model.tank();
         inputs.add(Input.figure("ship", "trim_for_readings_m", trim));
         inputs.add(Input.figure("ship", "list_for_readings_deg", listDeg));
-        double sounding = ReadingVolume.sounding(tank, reading);
+        double sounding = ReadingVolume.sounding(model, reading);
         SoundingTable table = tank.soundings();
         if (table != null && (model.tableCovers(sounding, trim, listDeg) || !model.hasSoundableShape())) {
-            double argument = table.argument() == SoundingTable.Argument.SOUNDING || tank.pipe() == null
-                    ? sounding
-                    : tank.pipe().complement(sounding);
+            double argument = model.argument(table, sounding);
             addRows(inputs, table, argument, trim, listDeg);
             return step(tank, "sounding table, read linearly in reading, trim and heel", volume, inputs);
         }
