@@ -19,6 +19,7 @@ public final class Cli {
     private static Map<String, Command> commands() {
         Map<String, Command> commands = new LinkedHashMap<>();
         commands.put("assess", new AssessCommand());
+        commands.put("audit", new AuditCommand());
         commands.put("tabulate", new TabulateCommand());
         return commands;
     }
