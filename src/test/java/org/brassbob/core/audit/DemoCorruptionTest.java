@@ -77,7 +77,7 @@ class DemoCorruptionTest {
         Vessel vessel = loaded.value();
         return vessel == null
                 ? loaded.problems().stream().anyMatch(p -> p.file().equals(path))
-                : Audit.of(vessel).stream()
+                : Audit.of(relevant(vessel, path)).stream()
                         .anyMatch(f -> f.severity() == Finding.Severity.ERROR
                                 && f.file().equals(path));
     }
