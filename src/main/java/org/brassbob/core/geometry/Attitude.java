@@ -9,6 +9,17 @@ package org.brassbob.core.geometry;
  * @param heelSlope tangent of the heel, to starboard positive
  */
 public record Attitude(double trimSlope, double heelSlope) {
+    /**
+     * Any slopes that are numbers.
+     *
+     * @throws IllegalArgumentException if either is not finite
+     */
+    public Attitude {
+        if (!Double.isFinite(trimSlope) || !Double.isFinite(heelSlope)) {
+            throw new IllegalArgumentException("no attitude with slopes " + trimSlope + " and " + heelSlope);
+        }
+    }
+
     /** On even keel and upright. */
     public static final Attitude UPRIGHT = new Attitude(0, 0);
 

@@ -10,4 +10,7 @@ package org.brassbob.core.geometry;
  * @param vcg its centroid, m above the baseline; NaN where there is no volume
  * @param surface the surface itself
  */
-public record Immersed(double volume, double lcg, double tcg, double vcg, LiquidSurface surface) {}
+public record Immersed(double volume, double lcg, double tcg, double vcg, LiquidSurface surface) {
+    /** Nothing at all below the surface. */
+    public static final Immersed NOTHING = new Immersed(0, Double.NaN, Double.NaN, Double.NaN, LiquidSurface.NONE);
+}

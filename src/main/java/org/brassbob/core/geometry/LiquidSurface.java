@@ -12,8 +12,11 @@ package org.brassbob.core.geometry;
  * @param longitudinal second moment about the athwartships axis through the centroid, in the surface (m4)
  */
 public record LiquidSurface(double area, double x, double y, double transverse, double longitudinal) {
-    /** No surface at all: an empty space, or one pressed up. */
+    /** No surface at all: an empty space, or one pressed up. Its centroid is NaN. */
     public static final LiquidSurface NONE = new LiquidSurface(0, Double.NaN, Double.NaN, 0, 0);
+
+    /** An area that is less than this share of what cancelled to leave it is rounding, no surface. */
+    private static final double NO_AREA = 1e-12;
 
     /**
      * From integrals over the projection of the surface on the ship's xy plane, about any origin.
@@ -23,7 +26,7 @@ public record LiquidSurface(double area, double x, double y, double transverse, 
      * {@code J = √(1 + p² + q²)} (the stretch of area) and {@code c = 1/√(1 + p²)}.
      */
     static LiquidSurface of(Attitude attitude, double originX, double originY, Moments m) {
-        if (!(m.area > 0)) {
+        if (!(m.area > NO_AREA * m.gross)) {
             return NONE;
         }
         double meanX = m.x / m.area;

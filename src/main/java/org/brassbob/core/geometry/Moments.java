@@ -12,8 +12,11 @@ package org.brassbob.core.geometry;
  * parallel to z project to nothing and have no part at all. Integrals of products over a triangle are closed forms
  * (∫fg dA = A/12·(Σf·g + Σf·Σg), for linear f and g given at the corners).
  */
-final class Moments {
+final class Moments implements SkinCut.Sums {
     double area;
+    /** The same without regard to sign: how much cancelled to leave the area. */
+    double gross;
+
     double x;
     double y;
     double xx;
@@ -24,8 +27,8 @@ final class Moments {
     double volumeY;
     double volumeH;
 
-    /** Adds a wet triangle; the order of the corners gives the sign. */
-    void add(double x0, double y0, double h0, double x1, double y1, double h1, double x2, double y2, double h2) {
+    @Override
+    public void add(double x0, double y0, double h0, double x1, double y1, double h1, double x2, double y2, double h2) {
         double a = ((x1 - x0) * (y2 - y0) - (x2 - x0) * (y1 - y0)) / 2;
         double sx = x0 + x1 + x2;
         double sy = y0 + y1 + y2;
@@ -33,6 +36,7 @@ final class Moments {
         double third = a / 3;
         double twelfth = a / 12;
         area -= a;
+        gross += Math.abs(a);
         x -= third * sx;
         y -= third * sy;
         xx -= twelfth * (x0 * x0 + x1 * x1 + x2 * x2 + sx * sx);

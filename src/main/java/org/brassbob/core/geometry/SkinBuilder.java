@@ -1,8 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 package org.brassbob.core.geometry;
 
-import java.util.Arrays;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import org.brassbob.core.geometry.SectionCheck.Strip;
 import org.brassbob.core.geometry.SpaceShape.Point;
 
@@ -15,8 +17,8 @@ final class SkinBuilder {
     private final Bounds bounds;
     private final double originX;
     private final double originY;
-    private double[] facets = new double[512];
-    private int used;
+    private final Map<Corner, Integer> corners = new LinkedHashMap<>();
+    private final List<Integer> facets = new ArrayList<>();
 
     SkinBuilder(List<Strip> strips) {
         this.strips = strips;
@@ -37,11 +39,19 @@ final class SkinBuilder {
                 quad(a, b, c, d);
             }
         }
-        Solid solid = new Solid(originX, originY, Arrays.copyOf(facets, used), bounds);
+        Solid solid = new Solid(originX, originY, skin(), bounds);
         if (!(solid.volume() > 0)) {
             throw new ShapeException(0, "the shape holds no volume; expected a closed solid");
         }
         return solid;
+    }
+
+    private Skin skin() {
+        return new Skin(
+                corners.keySet().stream().mapToDouble(Corner::x).toArray(),
+                corners.keySet().stream().mapToDouble(Corner::y).toArray(),
+                corners.keySet().stream().mapToDouble(Corner::z).toArray(),
+                facets.stream().mapToInt(Integer::intValue).toArray());
     }
 
     private Corner corner(double x, Point point) {
@@ -83,13 +93,8 @@ final class SkinBuilder {
         if (projected == 0) {
             return;
         }
-        if (used + 9 > facets.length) {
-            facets = Arrays.copyOf(facets, 2 * facets.length);
-        }
-        for (Corner corner : new Corner[] {a, b, c}) {
-            facets[used++] = corner.x;
-            facets[used++] = corner.y;
-            facets[used++] = corner.z;
+        for (Corner corner : List.of(a, b, c)) {
+            facets.add(corners.computeIfAbsent(corner, k -> corners.size()));
         }
     }
 
