@@ -162,7 +162,7 @@ public final class Assessor {
             }
         }
         if (!open.isEmpty()) {
-            WorstLevels.choose(open, totals, t -> maker.gm(t, trim), trim);
+            WorstLevels.choose(open, totals, maker::gm, trim);
         }
         return totals;
     }

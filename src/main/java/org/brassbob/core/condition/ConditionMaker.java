@@ -24,7 +24,12 @@ final class ConditionMaker {
     }
 
     /** The corrected GM (m) alone, for looking at many levels. */
-    double gm(Totals totals, double trim) {
+    double gm(Totals totals) {
+        double trim = 0;
+        if (flotation.readsTrim()) {
+            HydrostaticTable.Entry even = flotation.evenKeel(totals.mass, seaDensity);
+            trim = flotation.trim(even, totals.mass, totals.lcg(), seaDensity);
+        }
         double km = flotation.trimmed(totals.mass, seaDensity, trim).kmt();
         return km - totals.kg() - totals.fsmByCode / totals.mass;
     }

@@ -44,8 +44,13 @@ final class Flotation {
                 Math.min(Math.max(0, table.trims().first()), table.trims().last()));
     }
 
+    /** Whether the table has rows for several trims. */
+    boolean readsTrim() {
+        return table.trims().size() > 1;
+    }
+
     boolean coversTrim(double trim) {
-        return table.trims().size() == 1 || table.trims().covers(trim);
+        return !readsTrim() || table.trims().covers(trim);
     }
 
     /** The entry at a displacement (t) on even keel. */
