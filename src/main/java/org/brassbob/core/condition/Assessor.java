@@ -84,10 +84,11 @@ public final class Assessor {
         ConditionMaker maker =
                 new ConditionMaker(flotation, observedDensity == null ? vessel.seaDensity() : observedDensity);
         Settled settled = settle(round, loads, maker);
-        Condition condition = maker.of(settled.totals, working);
-        recordAttitude(settled, working);
-        List<TankFigures> tanks =
-                new FiguresMaker(vessel, settled.totals, settled.trim, settled.listDeg, working).of(loads);
+        Condition condition = maker.of(settled.totals);
+        List<TankFigures> tanks = new FiguresMaker(vessel, settled.totals).of(loads);
+        if (working.recording()) {
+            record(working, settled, loads, maker, condition);
+        }
         List<Notice> notices = new ArrayList<>();
         tanks.forEach(t -> notices.addAll(t.notes()));
         addShipNotices(notices, condition, settled, maker);
@@ -128,7 +129,7 @@ public final class Assessor {
         double list = observedList == null ? 0 : observedList;
         for (int pass = 1; ; pass++) {
             Totals totals = pass(loads, trim, list, maker);
-            Condition condition = maker.of(totals, Working.OFF);
+            Condition condition = maker.of(totals);
             double trimStep = observedTrim.isPresent() ? 0 : condition.trim() - trim;
             double listStep = observedList != null ? 0 : listOf(condition) - list;
             boolean settled = Math.abs(trimStep) < SETTLED_TRIM && Math.abs(listStep) < SETTLED_LIST_DEG;
@@ -162,17 +163,20 @@ public final class Assessor {
             }
         }
         if (!open.isEmpty()) {
-            WorstLevels.choose(open, totals, t -> maker.gm(t, trim), trim);
+            WorstLevels.choose(open, totals, maker::gm, trim);
         }
         return totals;
     }
 
-    private static void recordAttitude(Settled settled, Working working) {
-        if (working.recording()) {
-            String rule = "observed, or worked out and repeated until the readings agree with it";
-            working.step(Step.of("ship", "trim_for_readings_m", rule, settled.trim));
-            working.step(Step.of("ship", "list_for_readings_deg", rule, settled.listDeg));
-        }
+    private void record(
+            Working working, Settled settled, List<TankLoad> loads, ConditionMaker maker, Condition condition) {
+        String rule = "observed, or worked out and repeated until the readings agree with it";
+        working.step(Step.of("ship", "trim_for_readings_m", rule, settled.trim));
+        working.step(Step.of("ship", "list_for_readings_deg", rule, settled.listDeg));
+        TankWorking tanks =
+                new TankWorking(vessel.policy().massIn(), settled.totals, settled.trim, settled.listDeg, working);
+        loads.forEach(tanks::record);
+        new ConditionWorking(vessel, flotation, maker.seaDensity(), condition, working).record(settled.totals, loads);
     }
 
     private void addShipNotices(List<Notice> notices, Condition condition, Settled settled, ConditionMaker maker) {

@@ -2,7 +2,6 @@
 package org.brassbob.core.condition;
 
 import org.brassbob.core.table.HydrostaticTable;
-import org.brassbob.core.working.Working;
 
 /** From the sums of masses and moments to the ship's condition. */
 final class ConditionMaker {
@@ -14,18 +13,28 @@ final class ConditionMaker {
         this.seaDensity = seaDensity;
     }
 
+    /** Of the water she floats in (t/m3). */
+    double seaDensity() {
+        return seaDensity;
+    }
+
     /** Whether the hydrostatic table reaches a displacement (t) in this water. */
     boolean covers(double displacement) {
         return flotation.covers(displacement, seaDensity);
     }
 
     /** The corrected GM (m) alone, for looking at many levels. */
-    double gm(Totals totals, double trim) {
+    double gm(Totals totals) {
+        double trim = 0;
+        if (flotation.readsTrim()) {
+            HydrostaticTable.Entry even = flotation.evenKeel(totals.mass, seaDensity);
+            trim = flotation.trim(even, totals.mass, totals.lcg(), seaDensity);
+        }
         double km = flotation.trimmed(totals.mass, seaDensity, trim).kmt();
         return km - totals.kg() - totals.fsmByCode / totals.mass;
     }
 
-    Condition of(Totals totals, Working working) {
+    Condition of(Totals totals) {
         double displacement = totals.mass;
         double lcg = totals.lcg();
         HydrostaticTable.Entry even = flotation.evenKeel(displacement, seaDensity);
@@ -38,7 +47,7 @@ final class ConditionMaker {
         double gm = gmSolid - fsByCode;
         double bm = entry.kmt() - entry.kb();
         double aft = flotation.draughtAft(entry, trim);
-        Condition condition = new Condition(
+        return new Condition(
                 displacement,
                 lcg,
                 totals.tcg(),
@@ -56,9 +65,5 @@ final class ConditionMaker {
                 trim,
                 Heel.listDeg(totals.tcg(), gm, bm),
                 Heel.lollDeg(gm, bm));
-        if (working.recording()) {
-            new ConditionWorking(flotation, seaDensity, working).record(totals, condition, even, entry);
-        }
-        return condition;
     }
 }

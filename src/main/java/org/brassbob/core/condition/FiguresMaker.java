@@ -4,16 +4,10 @@ package org.brassbob.core.condition;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import org.brassbob.core.contents.VolumeWorking;
 import org.brassbob.core.notice.Notice;
 import org.brassbob.core.notice.NoticeCode;
-import org.brassbob.core.round.Reading;
 import org.brassbob.core.vessel.Tank;
-import org.brassbob.core.vessel.Use;
 import org.brassbob.core.vessel.Vessel;
-import org.brassbob.core.working.Step;
-import org.brassbob.core.working.Step.Input;
-import org.brassbob.core.working.Working;
 
 /** From the loads to the figures of each tank: losses, shares, ranks and notes. */
 final class FiguresMaker {
@@ -26,16 +20,10 @@ final class FiguresMaker {
 
     private final Vessel vessel;
     private final Totals totals;
-    private final Working working;
-    private final double trim;
-    private final double listDeg;
 
-    FiguresMaker(Vessel vessel, Totals totals, double trim, double listDeg, Working working) {
+    FiguresMaker(Vessel vessel, Totals totals) {
         this.vessel = vessel;
         this.totals = totals;
-        this.trim = trim;
-        this.listDeg = listDeg;
-        this.working = working;
     }
 
     List<TankFigures> of(List<TankLoad> loads) {
@@ -44,9 +32,6 @@ final class FiguresMaker {
         for (int i = 0; i < loads.size(); i++) {
             TankLoad load = loads.get(i);
             figures.add(figures(load, ranks[i]));
-            if (working.recording()) {
-                record(load);
-            }
         }
         return figures;
     }
@@ -137,58 +122,5 @@ final class FiguresMaker {
                         load.tank().id(),
                         load.range().low(),
                         load.volume());
-    }
-
-    private void record(TankLoad load) {
-        Tank tank = load.tank();
-        String id = tank.id();
-        Reading reading = load.reading();
-        working.step(
-                reading == null
-                        ? Step.of(
-                                id,
-                                "volume_m3",
-                                "no reading: the level that gives the lowest corrected GM",
-                                load.volume())
-                        : VolumeWorking.volume(load.model(), reading, load.volume(), trim, listDeg));
-        VolumeWorking.contents(load.model(), load.volume(), trim, load.contents())
-                .forEach(working::step);
-        Input density = Input.figure(id, "density_t_m3", load.liquid().density());
-        Input secondMoment =
-                Input.figure(id, "second_moment_m4", load.contents().secondMoment());
-        working.step(Step.of(
-                id,
-                "density_t_m3",
-                tank.liquid().expansion().code() + " expansion from "
-                        + tank.liquid().density() + " t/m3",
-                load.liquid().density()));
-        working.step(Step.of(
-                id,
-                "mass_t",
-                load.water() > 0 ? "volume·density, free water at its own" : "volume·density",
-                load.mass(),
-                Input.figure(id, "volume_m3", load.volume()),
-                density));
-        working.step(Step.of(
-                id,
-                "fsm_as_sounded_tm",
-                "density·second moment where slack",
-                load.fsmAsSounded(),
-                density,
-                secondMoment));
-        working.step(Step.of(id, "fsm_by_code_tm", codeRule(tank), load.fsmByCode(), density, secondMoment));
-        working.step(Step.of(
-                id,
-                "gm_loss_m",
-                "free-surface moment by the code / displacement",
-                load.fsmByCode() / totals.mass,
-                Input.figure(id, "fsm_by_code_tm", load.fsmByCode()),
-                Input.figure("ship", "displacement_t", totals.mass)));
-    }
-
-    private static String codeRule(Tank tank) {
-        return tank.use() == Use.FIXED
-                ? "fixed level: at its level (2008 IS Code part B 3.1.3)"
-                : "consumable: greatest between residue and the lesser of fill limit and 98 % (2008 IS Code part B 3.1.3)";
     }
 }

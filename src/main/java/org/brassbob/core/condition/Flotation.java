@@ -1,8 +1,12 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 package org.brassbob.core.condition;
 
+import java.util.ArrayList;
+import java.util.List;
+import org.brassbob.core.contents.RowsRead;
 import org.brassbob.core.table.HydrostaticTable;
 import org.brassbob.core.vessel.Vessel;
+import org.brassbob.core.working.Step.Input;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -44,8 +48,13 @@ final class Flotation {
                 Math.min(Math.max(0, table.trims().first()), table.trims().last()));
     }
 
+    /** Whether the table has rows for several trims. */
+    boolean readsTrim() {
+        return table.trims().size() > 1;
+    }
+
     boolean coversTrim(double trim) {
-        return table.trims().size() == 1 || table.trims().covers(trim);
+        return !readsTrim() || table.trims().covers(trim);
     }
 
     /** The entry at a displacement (t) on even keel. */
@@ -58,11 +67,18 @@ final class Flotation {
         return table.at(tableDisplacement(displacement, seaDensity), trim);
     }
 
-    /** The files and lines of the rows read at a displacement (t, in the table's water) and trim (m). */
-    String rowsAt(double tableDisplacement, double trim) {
-        HydrostaticTable.Rows rows = table.rows(table.trims().cell(trim));
-        int row = rows.displacements().cell(tableDisplacement);
-        return rows.origin().at(row) + " and the row after it";
+    /** Displacement and KM of the rows read at a displacement (t, in the table's water) and trim (m), and where they stand. */
+    List<Input> rowsAt(double tableDisplacement, double trim) {
+        List<Input> inputs = new ArrayList<>();
+        for (int set : RowsRead.about(table.trims(), trim)) {
+            HydrostaticTable.Rows rows = table.rows(set);
+            for (int row : RowsRead.about(rows.displacements(), tableDisplacement)) {
+                String source = rows.origin().at(row);
+                inputs.add(Input.from("displacement_t", rows.displacements().value(row), source));
+                inputs.add(Input.from("kmt_m", rows.entries().get(row).kmt(), source));
+            }
+        }
+        return inputs;
     }
 
     /** MCT (t·m/cm) in water of a density. */

@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 package org.brassbob.core.condition;
 
+import java.util.ArrayList;
 import java.util.List;
+import org.brassbob.core.contents.RowsRead;
 import org.brassbob.core.notice.Notice;
 import org.brassbob.core.notice.NoticeCode;
 import org.brassbob.core.table.LimitCurve;
@@ -25,6 +27,10 @@ final class MarginJudge {
     static Margin judge(
             Vessel vessel, @Nullable String curve, Condition condition, List<Notice> notices, Working working) {
         double band = vessel.policy().gmAllowance();
+        if (working.recording()) {
+            Input allowance = Input.from("gm_allowance_m", band, "vessel.json: policy");
+            working.step(Step.of("ship", "band_m", "the ship's allowance", band, allowance));
+        }
         if (curve == null && vessel.limitCurves().isEmpty()) {
             notices.add(Notice.of(NoticeCode.NO_LIMIT_CURVE, "ship"));
             return new Margin("", Double.NaN, Double.NaN, band, Margin.State.CAUTION);
@@ -69,17 +75,20 @@ final class MarginJudge {
     }
 
     private static void record(Working working, LimitCurve limit, Condition condition, double required, double margin) {
-        int row = limit.displacements().cell(condition.displacement());
         String rule = limit.kind() == LimitCurve.Kind.GM_REQUIRED
                 ? "limit curve, read linearly at the displacement"
                 : "KM − permissible KG, read linearly at the displacement";
-        working.step(Step.of(
-                "ship",
-                "gm_required_m",
-                rule,
-                required,
-                Input.figure("ship", "displacement_t", condition.displacement()),
-                Input.from("limit_m", limit.value(row), limit.origin().at(row))));
+        List<Input> inputs = new ArrayList<>();
+        inputs.add(Input.figure("ship", "displacement_t", condition.displacement()));
+        if (limit.kind() == LimitCurve.Kind.KG_LIMIT) {
+            inputs.add(Input.figure("ship", "kmt_m", condition.kmt()));
+        }
+        for (int row : RowsRead.about(limit.displacements(), condition.displacement())) {
+            String source = limit.origin().at(row);
+            inputs.add(Input.from("displacement_t", limit.displacements().value(row), source));
+            inputs.add(Input.from("limit_m", limit.value(row), source));
+        }
+        working.step(new Step("ship/gm_required_m", rule, required, inputs));
         working.step(Step.of(
                 "ship",
                 "margin_m",

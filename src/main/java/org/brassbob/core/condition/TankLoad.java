@@ -155,6 +155,11 @@ final class TankLoad {
         return water > 0 ? momentZ / mass : contents.vcg();
     }
 
+    /** Whether its liquid has a free surface that counts. */
+    boolean hasSurface() {
+        return state == TankState.SLACK;
+    }
+
     /** The state as shown: unknown where there is no reading. */
     TankState shownState() {
         return reading == null ? TankState.UNKNOWN : state;

@@ -29,6 +29,30 @@ final class Totals {
         fsmByCode += factor * load.fsmByCode();
     }
 
+    Totals plus(Totals other) {
+        return sum(other, 1);
+    }
+
+    Totals minus(Totals other) {
+        return sum(other, -1);
+    }
+
+    private Totals sum(Totals other, int factor) {
+        Totals sum = new Totals();
+        sum.mass = mass + factor * other.mass;
+        sum.momentX = momentX + factor * other.momentX;
+        sum.momentY = momentY + factor * other.momentY;
+        sum.momentZ = momentZ + factor * other.momentZ;
+        sum.fsmAsSounded = fsmAsSounded + factor * other.fsmAsSounded;
+        sum.fsmByCode = fsmByCode + factor * other.fsmByCode;
+        return sum;
+    }
+
+    /** All that tanks take from the corrected GM at a given displacement: vertical and free-surface moment (t·m). */
+    double verticalAndFreeSurface() {
+        return momentZ + fsmByCode;
+    }
+
     double lcg() {
         return momentX / mass;
     }

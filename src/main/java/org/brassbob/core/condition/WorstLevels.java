@@ -2,21 +2,18 @@
 package org.brassbob.core.condition;
 
 import java.util.List;
-import org.brassbob.core.contents.TankState;
-import org.brassbob.core.table.VolumeTable;
-import org.brassbob.core.vessel.Tank;
 
 /**
- * Chooses, where readings leave a choice, the volumes that give the lowest corrected GM. It looks at many levels of one tank while the
- * others stand still, refines the best, and goes round the tanks until none can be made worse; once from all at their least and once
- * from all at their greatest, and keeps the worse outcome.
+ * Chooses, where readings leave a choice, the volumes that give the lowest corrected GM. It looks at many levels of every tank: at the
+ * worst set for each displacement that they can make ({@link MomentByMass}), and from there, from all at their least and from all at
+ * their greatest tank by tank until none can be made worse. Then it looks in the same way more closely about the worst.
  */
 final class WorstLevels {
-    private static final int LEVELS = 64;
     private static final int ROUNDS = 12;
-    private static final double GOLDEN = (Math.sqrt(5) - 1) / 2;
+    private static final double SETTLED_GM = 1e-9;
+    private static final int REFINEMENTS = 3;
 
-    /** The corrected GM of a set of sums. */
+    /** The corrected GM (m) of a set of sums. */
     interface Gm {
         double of(Totals totals);
     }
@@ -38,111 +35,85 @@ final class WorstLevels {
      *
      * @param open those tanks, already part of the sums
      * @param totals sums of the whole ship; kept up to date
+     * @param gm the corrected GM of any sums
+     * @param trim m, at which the tanks' surfaces are taken
      */
     static void choose(List<TankLoad> open, Totals totals, Gm gm, double trim) {
         new WorstLevels(open, totals, gm, trim).choose();
     }
 
     private void choose() {
-        double fromLeast = settle();
-        double[] chosen = open.stream().mapToDouble(TankLoad::volume).toArray();
-        for (TankLoad load : open) {
-            put(load, load.range().high());
+        open.forEach(load -> totals.add(load, -1));
+        List<Level[]> levels =
+                open.stream().map(load -> Level.allOf(load, trim)).toList();
+        fill(levels, worst(levels, List.of(new int[open.size()], greatest(levels))));
+        for (int i = 0; i < REFINEMENTS; i++) {
+            double share = Math.pow(2.0 / Level.SPREAD, i) / Level.SPREAD;
+            List<Level[]> closer = open.stream()
+                    .map(load -> Level.about(
+                            load, share * (load.range().high() - load.range().low()), trim))
+                    .toList();
+            fill(closer, worst(closer, List.of(new int[open.size()])));
         }
-        if (settle() > fromLeast) {
-            for (int i = 0; i < chosen.length; i++) {
-                put(open.get(i), chosen[i]);
-            }
+        open.forEach(load -> totals.add(load, 1));
+    }
+
+    private void fill(List<Level[]> levels, int[] chosen) {
+        for (int i = 0; i < chosen.length; i++) {
+            open.get(i).fill(levels.get(i)[chosen[i]].volume(), trim);
         }
     }
 
-    private double settle() {
-        double lowest = gm.of(totals);
+    /** The worst choice reached from the starts given, or from the worst for each displacement. */
+    private int[] worst(List<Level[]> levels, List<int[]> starts) {
+        int[] worst = MomentByMass.worst(levels, totals, gm);
+        double lowest = descend(worst, levels);
+        for (int[] start : starts) {
+            double value = descend(start, levels);
+            if (value < lowest) {
+                lowest = value;
+                worst = start;
+            }
+        }
+        return worst;
+    }
+
+    private static int[] greatest(List<Level[]> levels) {
+        return levels.stream()
+                .mapToInt(tank -> tank.length == 2 ? 1 : Level.SPREAD)
+                .toArray();
+    }
+
+    /** Goes round the tanks until no other level of any one of them is worse. */
+    private double descend(int[] chosen, List<Level[]> levels) {
+        Totals sums = totals;
+        for (int i = 0; i < chosen.length; i++) {
+            sums = sums.plus(levels.get(i)[chosen[i]].part());
+        }
+        double lowest = gm.of(sums);
         for (int round = 0; round < ROUNDS; round++) {
             double before = lowest;
-            for (TankLoad load : open) {
-                lowest = Math.min(lowest, worsen(load));
+            for (int i = 0; i < chosen.length; i++) {
+                Totals others = sums.minus(levels.get(i)[chosen[i]].part());
+                lowest = worsen(chosen, i, levels.get(i), others, lowest);
+                sums = others.plus(levels.get(i)[chosen[i]].part());
             }
-            if (before - lowest < 1e-9) {
+            if (before - lowest < SETTLED_GM) {
                 break;
             }
         }
         return lowest;
     }
 
-    /** Puts the worst volume in one tank and returns the corrected GM with it. */
-    private double worsen(TankLoad load) {
-        double best = load.volume();
-        double lowest = gm.of(totals);
-        for (double candidate : candidates(load)) {
-            double value = with(load, candidate);
+    private double worsen(int[] chosen, int i, Level[] levels, Totals others, double sofar) {
+        double lowest = sofar;
+        for (int k = 0; k < levels.length; k++) {
+            double value = gm.of(others.plus(levels[k].part()));
             if (value < lowest) {
                 lowest = value;
-                best = candidate;
+                chosen[i] = k;
             }
         }
-        if (load.isOpen()) {
-            best = refined(load, best);
-        }
-        return with(load, best);
-    }
-
-    private double with(TankLoad load, double volume) {
-        put(load, volume);
-        return gm.of(totals);
-    }
-
-    private void put(TankLoad load, double volume) {
-        totals.add(load, -1);
-        load.fill(volume, trim);
-        totals.add(load, 1);
-    }
-
-    /** An interval has two ends. A tank without a reading has levels: evenly spread, those of its table, and just short of full. */
-    private static double[] candidates(TankLoad load) {
-        double low = load.range().low();
-        double high = load.range().high();
-        if (!load.isOpen()) {
-            return new double[] {low, high};
-        }
-        Tank tank = load.tank();
-        double nearlyFull = TankState.FULL_SHARE * tank.capacity() * (1 - 1e-9);
-        VolumeTable table = tank.volumes();
-        int rows = table == null ? 0 : table.volumes().size();
-        double[] levels = new double[LEVELS + 2 + rows];
-        for (int i = 0; i <= LEVELS; i++) {
-            levels[i] = low + (high - low) * i / LEVELS;
-        }
-        levels[LEVELS + 1] = Math.min(high, Math.max(low, nearlyFull));
-        for (int i = 0; i < rows && table != null; i++) {
-            levels[LEVELS + 2 + i] =
-                    Math.min(high, Math.max(low, table.volumes().value(i)));
-        }
-        return levels;
-    }
-
-    /** Golden section about the best level found, within the spacing of the levels looked at. */
-    private double refined(TankLoad load, double best) {
-        double spacing = (load.range().high() - load.range().low()) / LEVELS;
-        double a = Math.max(load.range().low(), best - spacing);
-        double b = Math.min(load.range().high(), best + spacing);
-        double lowest = with(load, best);
-        double found = best;
-        while (b - a > 1e-6 * load.tank().capacity()) {
-            double left = b - GOLDEN * (b - a);
-            double right = a + GOLDEN * (b - a);
-            double atLeft = with(load, left);
-            double atRight = with(load, right);
-            if (Math.min(atLeft, atRight) < lowest) {
-                lowest = Math.min(atLeft, atRight);
-                found = atLeft < atRight ? left : right;
-            }
-            if (atLeft < atRight) {
-                b = right;
-            } else {
-                a = left;
-            }
-        }
-        return found;
+        return lowest;
     }
 }

@@ -13,6 +13,9 @@ import org.jspecify.annotations.Nullable;
 
 /** Turns a reading into the volume that it states, at the trim and list at which it was taken. */
 public final class ReadingVolume {
+    /** What the arithmetic of a shape may add or lose, as a share of capacity. */
+    private static final double ROUNDING = 1e-9;
+
     private ReadingVolume() {}
 
     /**
@@ -78,9 +81,14 @@ public final class ReadingVolume {
         if (model.hasSoundingTable() && (beyondItsLastUllage || !model.tableCovers(depth, trim, listDeg))) {
             addOutside(notices, model, read, volume, trim, listDeg);
         }
-        boolean dry = sounding <= 0;
-        boolean brim = depth >= model.brim();
-        return new VolumeRange(dry ? 0 : volume, brim ? Math.max(volume, tank.capacity()) : volume, notices);
+        double low = sounding <= 0 ? 0 : volume;
+        double high = depth >= model.brim() ? Math.max(volume, tank.capacity()) : volume;
+        if (high - low <= ROUNDING * tank.capacity()) {
+            // A trace left by rounding is no choice, and must not make an empty tank slack or a full one not quite so.
+            double only = sounding <= 0 ? low : high;
+            return new VolumeRange(only, only, notices);
+        }
+        return new VolumeRange(low, high, notices);
     }
 
     private static void addOutside(

@@ -67,7 +67,9 @@ public final class TankModel {
         if (volume <= tank.residue()) {
             return TankState.EMPTY;
         }
-        return volume >= TankState.FULL_SHARE * tank.capacity() ? TankState.FULL : TankState.SLACK;
+        // A tank read as 98 % must count as full whatever the last binary digit of its capacity.
+        double full = TankState.FULL_SHARE * tank.capacity() * (1 - 1e-12);
+        return volume >= full ? TankState.FULL : TankState.SLACK;
     }
 
     /** Whether soundings can be turned into volumes. */

@@ -4,7 +4,6 @@ package org.brassbob.core.contents;
 import java.util.ArrayList;
 import java.util.List;
 import org.brassbob.core.round.Reading;
-import org.brassbob.core.table.Axis;
 import org.brassbob.core.table.SoundingTable;
 import org.brassbob.core.table.VolumeTable;
 import org.brassbob.core.vessel.Tank;
@@ -16,7 +15,8 @@ public final class VolumeWorking {
     private VolumeWorking() {}
 
     /** The step from a reading to a volume. */
-    public static Step volume(TankModel model, Reading reading, double volume, double trim, double listDeg) {
+    public static Step volume(
+            TankModel model, Reading reading, double volume, double density, double trim, double listDeg) {
         Tank tank = model.tank();
         List<Input> inputs = new ArrayList<>();
         if (reading.kind().hasValue()) {
@@ -32,7 +32,7 @@ public final class VolumeWorking {
                 yield step(tank, "per cent of capacity", volume, inputs);
             }
             case MASS -> {
-                inputs.add(Input.figure(tank.id(), "density_t_m3", reading.value() / volume));
+                inputs.add(Input.figure(tank.id(), "density_t_m3", density));
                 yield step(tank, "mass / density", volume, inputs);
             }
             case EMPTY -> step(tank, "reported empty", volume, inputs);
@@ -57,9 +57,9 @@ public final class VolumeWorking {
     }
 
     private static void addRows(List<Input> inputs, SoundingTable table, double argument, double trim, double listDeg) {
-        for (int r : cells(table.readings(), argument)) {
-            for (int t : cells(table.trims(), trim)) {
-                for (int h : cells(table.heels(), listDeg)) {
+        for (int r : RowsRead.about(table.readings(), argument)) {
+            for (int t : RowsRead.about(table.trims(), trim)) {
+                for (int h : RowsRead.about(table.heels(), listDeg)) {
                     int node = table.node(r, t, h);
                     inputs.add(Input.from(
                             "volume_m3", table.volume(node), table.origin().at(node)));
@@ -68,36 +68,40 @@ public final class VolumeWorking {
         }
     }
 
-    private static int[] cells(Axis axis, double at) {
-        int cell = axis.cell(at);
-        double fraction = axis.fraction(at, cell);
-        if (fraction == 0) {
-            return new int[] {cell};
+    /**
+     * The steps from a volume to its centroid (lcg, tcg, vcg) and second moment.
+     *
+     * @param keys what the four are called
+     */
+    public static List<Step> contents(
+            TankModel model, String volumeKey, double volume, double trim, VolumeTable.Entry entry, List<String> keys) {
+        String id = model.tank().id();
+        Input held = Input.figure(id, volumeKey, volume);
+        double[] values = {entry.lcg(), entry.tcg(), entry.vcg(), entry.secondMoment()};
+        List<Step> steps = new ArrayList<>();
+        for (int column = 0; column < values.length; column++) {
+            List<Input> inputs = new ArrayList<>();
+            inputs.add(held);
+            String rule = "volume table, read linearly";
+            if (model.tank().volumes() != null) {
+                addColumn(inputs, model.tank().volumes(), volume, column, keys.get(column));
+            } else {
+                rule = "shape, for this volume at the trim of the readings, without list";
+                inputs.add(Input.figure("ship", "trim_for_readings_m", trim));
+            }
+            steps.add(new Step(id + "/" + keys.get(column), rule, values[column], inputs));
         }
-        return fraction == 1 ? new int[] {cell + 1} : new int[] {cell, cell + 1};
+        return steps;
     }
 
-    /** The steps from a volume to its centroid (vcg) and second moment. */
-    public static List<Step> contents(TankModel model, double volume, double trim, VolumeTable.Entry entry) {
-        Tank tank = model.tank();
-        List<Input> inputs = new ArrayList<>();
-        inputs.add(Input.figure(tank.id(), "volume_m3", volume));
-        VolumeTable table = tank.volumes();
-        String rule = "shape, for this volume at the trim of the readings, without list";
-        if (table != null) {
-            rule = "volume table, read linearly";
-            for (int row : cells(table.volumes(), volume)) {
-                inputs.add(Input.from(
-                        "volume_m3", table.volumes().value(row), table.origin().at(row)));
-            }
-        } else {
-            inputs.add(Input.figure("ship", "trim_for_readings_m", trim));
+    private static void addColumn(List<Input> inputs, VolumeTable table, double volume, int column, String key) {
+        for (int row : RowsRead.about(table.volumes(), volume)) {
+            VolumeTable.Entry entry = table.row(row);
+            double[] values = {entry.lcg(), entry.tcg(), entry.vcg(), entry.secondMoment()};
+            String source = table.origin().at(row);
+            inputs.add(Input.from("volume_m3", table.volumes().value(row), source));
+            inputs.add(Input.from(key, values[column], source));
         }
-        return List.of(
-                new Step(tank.id() + "/lcg_m", rule, entry.lcg(), inputs),
-                new Step(tank.id() + "/tcg_m", rule, entry.tcg(), inputs),
-                new Step(tank.id() + "/vcg_m", rule, entry.vcg(), inputs),
-                new Step(tank.id() + "/second_moment_m4", rule, entry.secondMoment(), inputs));
     }
 
     private static Step step(Tank tank, String rule, double volume, List<Input> inputs) {
