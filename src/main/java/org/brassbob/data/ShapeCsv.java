@@ -14,7 +14,7 @@ import org.brassbob.core.table.Origin;
 
 /**
  * A shape file. Rows of one loop stand together; a loop number that comes again at the same x begins the second of two stations there
- * (a jump of the section).
+ * (a jump of the section). Where the rows of both follow each other with nothing between, {@link JumpSplitter} finds the seam.
  */
 final class ShapeCsv {
     private static final Columns COLUMNS = Columns.of(List.of("x_m", "loop", "y_m", "z_m"));
@@ -47,6 +47,7 @@ final class ShapeCsv {
         if (problems.count() > before) {
             return Optional.empty();
         }
+        JumpSplitter.split(stations, lines);
         SpaceShape shape = new SpaceShape(
                 stations, Origin.of(csv.file(), lines.stream().mapToInt(i -> i).toArray()));
         try {

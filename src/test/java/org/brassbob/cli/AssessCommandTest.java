@@ -152,8 +152,8 @@ class AssessCommandTest {
     void aLimitBrokenIsStatusOne() throws IOException {
         // Every tank of the double bottom half full: the demo ship loses more than her margin.
         StringBuilder csv = new StringBuilder("tank,at,kind,value\n");
-        for (String tank : List.of(
-                "db1-c", "db1-p", "db1-s", "db2-p", "db2-s", "db3-p", "db3-s", "db4-p", "db4-s", "dtc", "fp", "ap")) {
+        for (String tank :
+                List.of("db1-c", "db2-p", "db2-s", "db3-p", "db3-s", "db4-p", "db4-s", "dt1-c", "fp", "ap")) {
             csv.append(tank).append(",2026-03-04T06:10:00+01:00,percent,8\n");
         }
         Call call = Call.of("assess", HERON, "--round", round(csv.toString()), "--json");
@@ -172,8 +172,8 @@ class AssessCommandTest {
                 tank,at,kind,value
                 fp,2026-03-04T06:10:00+01:00,sounding,1.2.3
                 nosuch,2026-03-04T06:10:00+01:00,sounding,1
-                dtc,yesterday,sounding,1
-                dtc,2026-03-04T06:10:00+01:00,dip,1
+                dt1-c,yesterday,sounding,1
+                dt1-c,2026-03-04T06:10:00+01:00,dip,1
                 """);
         Call call = Call.of("assess", HERON, "--round", file);
         assertEquals(ExitStatus.UNUSABLE, call.status());
@@ -219,9 +219,9 @@ class AssessCommandTest {
     void workingLeadsDownToTheReading() {
         Call call = Call.of("assess", HERON, "--round", DEPARTURE, "--working");
         assertTrue(call.out().contains("ship/gm_m = "));
-        assertTrue(call.out().contains("fo1-p/volume_m3 = "));
+        assertTrue(call.out().contains("lsfo-p/volume_m3 = "));
         assertTrue(call.out().contains(DEPARTURE + ":"), "the reading's line");
-        assertTrue(call.out().contains("tanks/fo1-p.sounding.csv:"), "the table's rows");
+        assertTrue(call.out().contains("tanks/lsfo-p.sounding.csv:"), "the table's rows");
     }
 
     @Test

@@ -58,7 +58,7 @@ class CliTest {
     @Test
     void anAuditErrorIsStatusOneAndNamesTheLine() throws IOException {
         copyHeron();
-        Path table = folder.resolve("heron/tanks/dtc.volume.csv");
+        Path table = folder.resolve("heron/tanks/dt1-c.volume.csv");
         String[] lines = Files.readString(table).split("\n");
         lines[5] = lines[5].replaceFirst(",1\\.", ",2.");
         Files.writeString(table, String.join("\n", lines) + "\n");
@@ -98,6 +98,10 @@ class CliTest {
         Vessel heron = VesselFolder.read(ship).orElseThrow();
         for (Tank tank : heron.tanks()) {
             String volumes = "tanks/" + tank.id() + ".volume.csv";
+            String soundings = "tanks/" + tank.id() + ".sounding.csv";
+            assertEquals(
+                    Files.exists(ship.resolve(soundings)),
+                    Files.exists(folder.resolve("made").resolve(soundings)));
             assertEquals(
                     Files.readString(ship.resolve(volumes)),
                     Files.readString(folder.resolve("made").resolve(volumes)));

@@ -226,4 +226,40 @@ class VesselFolderTest {
                         .dataSha256());
         assertEquals(14, VesselFolder.fingerprints(good).size());
     }
+
+    /** The seam of two stations whose rows run on: a tank that jumps from 2 m to 1 m of height, its end stepping down by a corner. */
+    @Test
+    void aJumpOfOneLoopIsTwoStations() {
+        String step =
+                """
+                x_m,loop,y_m,z_m
+                4,1,-3,0.2
+                4,1,3,0.2
+                4,1,3,2.2
+                4,1,-3,2.2
+                7,1,-3,0.2
+                7,1,3,0.2
+                7,1,3,2.2
+                7,1,-3,2.2
+                7,1,-3,0.2
+                7,1,3,0.2
+                7,1,3,1.2
+                7,1,0,1.2
+                7,1,-3,1.2
+                10,1,-3,0.2
+                10,1,3,0.2
+                10,1,3,1.2
+                10,1,0,1.2
+                10,1,-3,1.2
+                """;
+        Vessel barge = VesselFolder.read(SmallShip.folder().with("tanks/fo.shape.csv", step))
+                .orElseThrow();
+        var shape =
+                java.util.Objects.requireNonNull(barge.tank("fo").orElseThrow().shape());
+        assertEquals(4, shape.stations().size());
+        assertEquals(10, shape.origin().line(2));
+        var moulded =
+                org.brassbob.core.contents.TankShapes.of(barge).moulded("fo").orElseThrow();
+        assertEquals(3 * 6 * 2 + 3 * 6, moulded.volume(), 1e-9);
+    }
 }

@@ -12,5 +12,6 @@ import org.brassbob.core.table.Axis;
  */
 public record CalibrationGrid(Axis trims, Axis heels, int readings) {
     /** What a coaster's booklet commonly carries. */
-    public static final CalibrationGrid USUAL = new CalibrationGrid(Axis.of(-1, 0, 1, 2, 3), Axis.of(-2, 0, 2), 40);
+    public static final CalibrationGrid USUAL =
+            new CalibrationGrid(Axis.of(-0.5, 0, 0.5, 1, 1.5, 2), Axis.of(-2, -1, 0, 1, 2), 40);
 }

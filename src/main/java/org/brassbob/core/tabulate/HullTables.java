@@ -21,7 +21,7 @@ import org.brassbob.core.vessel.Vessel;
  */
 public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves, LimitCurve requiredGm) {
     private static final int DRAUGHTS = 32;
-    private static final int DISPLACEMENTS = 14;
+    private static final int DISPLACEMENTS = 28;
     private static final Axis HEELS = Axis.of(5, 10, 15, 20, 25, 30, 35, 40, 50, 60);
 
     /** How far beyond light ship and summer draught the cross curves reach, as a share. */
