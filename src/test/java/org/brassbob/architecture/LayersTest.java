@@ -39,6 +39,7 @@ class LayersTest {
                         "java.time",
                         "java.time.chrono",
                         "java.util",
+                        "java.util.concurrent",
                         "java.util.function",
                         "java.util.stream",
                         "org.jspecify.annotations")

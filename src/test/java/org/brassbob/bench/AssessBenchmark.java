@@ -27,6 +27,8 @@ public class AssessBenchmark {
             BenchShip.round(RoundBuilder.round(), 0).build();
     private final SoundingRound twoUnknown =
             BenchShip.round(RoundBuilder.round().trim(0.83).list(-0.6), 2).build();
+    private final SoundingRound unobservedTwoUnknown =
+            BenchShip.round(RoundBuilder.round(), 2).build();
     private final SoundingRound[] trims = trims();
     private int next;
 
@@ -79,5 +81,15 @@ public class AssessBenchmark {
     @Benchmark
     public Assessment shapesTwoUnknown() {
         return shaped.assess(twoUnknown);
+    }
+
+    @Benchmark
+    public Assessment tablesUnobservedTwoUnknown() {
+        return tabled.assess(unobservedTwoUnknown);
+    }
+
+    @Benchmark
+    public Assessment shapesUnobservedTwoUnknown() {
+        return shaped.assess(unobservedTwoUnknown);
     }
 }

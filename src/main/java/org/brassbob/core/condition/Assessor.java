@@ -5,7 +5,7 @@ import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.OptionalDouble;
+import org.brassbob.core.condition.Settling.Settled;
 import org.brassbob.core.contents.LiquidState;
 import org.brassbob.core.contents.TankModel;
 import org.brassbob.core.contents.TankShapes;
@@ -16,7 +16,6 @@ import org.brassbob.core.round.SoundingRound;
 import org.brassbob.core.vessel.Policy;
 import org.brassbob.core.vessel.Tank;
 import org.brassbob.core.vessel.Vessel;
-import org.brassbob.core.vessel.Weight;
 import org.brassbob.core.working.Step;
 import org.brassbob.core.working.Working;
 import org.jspecify.annotations.Nullable;
@@ -28,20 +27,6 @@ import org.jspecify.annotations.Nullable;
  * works out from those very readings, repeated until it agrees.
  */
 public final class Assessor {
-    /** Trim and list have settled when a pass moves them by less than this (m, °); well inside the millimetre that is asked for. */
-    private static final double SETTLED_TRIM = 1e-5;
-
-    private static final double SETTLED_LIST_DEG = 1e-5;
-    private static final double ACCEPTED_TRIM = 1e-3;
-    private static final double ACCEPTED_LIST_DEG = 1e-2;
-    private static final int PASSES = 80;
-
-    /** From this pass on only half of each step is taken, in case the passes swing about the answer. */
-    private static final int DAMPED_FROM = 20;
-
-    /** Beyond this heel (°) a sounding says nothing; the search for the list is held within it. */
-    private static final double STEEPEST_LIST_DEG = 60;
-
     private final Vessel vessel;
     private final List<TankModel> models;
     private final Flotation flotation;
@@ -83,9 +68,9 @@ public final class Assessor {
         Double observedDensity = round.observed().seaDensity();
         ConditionMaker maker =
                 new ConditionMaker(flotation, observedDensity == null ? vessel.seaDensity() : observedDensity);
-        Settled settled = settle(round, loads, maker);
-        Condition condition = maker.of(settled.totals);
-        List<TankFigures> tanks = new FiguresMaker(vessel, settled.totals).of(loads);
+        Settled settled = new Settling(vessel, round.observed(), loads, maker).settle();
+        Condition condition = maker.of(settled.totals());
+        List<TankFigures> tanks = new FiguresMaker(vessel, settled.totals()).of(loads);
         if (working.recording()) {
             record(working, settled, loads, maker, condition);
         }
@@ -119,69 +104,20 @@ public final class Assessor {
         return Math.max(0, (later.toEpochSecond() - earlier.toEpochSecond()) / 3600.0);
     }
 
-    /** The outcome of the passes: sums, and the trim and list at which the readings were taken. */
-    private record Settled(Totals totals, double trim, double listDeg, boolean accepted) {}
-
-    private Settled settle(SoundingRound round, List<TankLoad> loads, ConditionMaker maker) {
-        OptionalDouble observedTrim = ObservedTrim.of(round.observed(), vessel);
-        Double observedList = round.observed().listDeg();
-        double trim = observedTrim.orElse(0);
-        double list = observedList == null ? 0 : observedList;
-        for (int pass = 1; ; pass++) {
-            Totals totals = pass(loads, trim, list, maker);
-            Condition condition = maker.of(totals);
-            double trimStep = observedTrim.isPresent() ? 0 : condition.trim() - trim;
-            double listStep = observedList != null ? 0 : listOf(condition) - list;
-            boolean settled = Math.abs(trimStep) < SETTLED_TRIM && Math.abs(listStep) < SETTLED_LIST_DEG;
-            if (settled || pass == PASSES) {
-                boolean accepted = Math.abs(trimStep) < ACCEPTED_TRIM && Math.abs(listStep) < ACCEPTED_LIST_DEG;
-                return new Settled(totals, trim, list, accepted);
-            }
-            double share = pass < DAMPED_FROM ? 1 : 0.5;
-            trim += share * trimStep;
-            list += share * listStep;
-        }
-    }
-
-    private static double listOf(Condition condition) {
-        double list = Double.isNaN(condition.listDeg()) ? 0 : condition.listDeg();
-        return Math.max(-STEEPEST_LIST_DEG, Math.min(STEEPEST_LIST_DEG, list));
-    }
-
-    private Totals pass(List<TankLoad> loads, double trim, double listDeg, ConditionMaker maker) {
-        Totals totals = new Totals();
-        totals.add(vessel.lightship());
-        for (Weight weight : vessel.weights()) {
-            totals.add(weight.at());
-        }
-        List<TankLoad> open = new ArrayList<>();
-        for (TankLoad load : loads) {
-            load.read(trim, listDeg);
-            totals.add(load, 1);
-            if (load.range().isInterval()) {
-                open.add(load);
-            }
-        }
-        if (!open.isEmpty()) {
-            WorstLevels.choose(open, totals, maker::gm, trim);
-        }
-        return totals;
-    }
-
     private void record(
             Working working, Settled settled, List<TankLoad> loads, ConditionMaker maker, Condition condition) {
         String rule = "observed, or worked out and repeated until the readings agree with it";
-        working.step(Step.of("ship", "trim_for_readings_m", rule, settled.trim));
-        working.step(Step.of("ship", "list_for_readings_deg", rule, settled.listDeg));
+        working.step(Step.of("ship", "trim_for_readings_m", rule, settled.trim()));
+        working.step(Step.of("ship", "list_for_readings_deg", rule, settled.listDeg()));
         TankWorking tanks =
-                new TankWorking(vessel.policy().massIn(), settled.totals, settled.trim, settled.listDeg, working);
+                new TankWorking(vessel.policy().massIn(), settled.totals(), settled.trim(), settled.listDeg(), working);
         loads.forEach(tanks::record);
-        new ConditionWorking(vessel, flotation, maker.seaDensity(), condition, working).record(settled.totals, loads);
+        new ConditionWorking(vessel, flotation, maker.seaDensity(), condition, working).record(settled.totals(), loads);
     }
 
     private void addShipNotices(List<Notice> notices, Condition condition, Settled settled, ConditionMaker maker) {
-        if (!settled.accepted) {
-            notices.add(Notice.of(NoticeCode.NOT_SETTLED, "ship", settled.trim, settled.listDeg));
+        if (!settled.accepted()) {
+            notices.add(Notice.of(NoticeCode.NOT_SETTLED, "ship", settled.trim(), settled.listDeg()));
         }
         if (!maker.covers(condition.displacement())) {
             notices.add(Notice.of(NoticeCode.OUTSIDE_HYDROSTATICS_EDGE, "ship", condition.displacement()));

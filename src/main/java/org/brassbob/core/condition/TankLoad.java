@@ -20,6 +20,9 @@ final class TankLoad {
     private final LiquidState liquid;
     private final double waterDensity;
 
+    /** Where a tank without a reading is held (m3); NaN where it is free. */
+    private double pinned = Double.NaN;
+
     private VolumeRange range = VolumeRange.of(0);
     private double volume;
     private double water;
@@ -50,6 +53,17 @@ final class TankLoad {
         return range.isInterval() && model.stateOf(range.high()) != TankState.EMPTY;
     }
 
+    /** Holds a tank without a reading at a volume (m3). */
+    void pin(double held) {
+        pinned = held;
+        volume = held;
+    }
+
+    /** The least (m3) that a tank without a reading may hold. */
+    double leastOpen() {
+        return Math.min(tank().residue(), tank().fillLimit());
+    }
+
     /** Works out the volumes that the reading allows at a trim (m) and list (°), and starts from the least. */
     void read(double trim, double listDeg) {
         Reading taken = reading;
@@ -57,8 +71,10 @@ final class TankLoad {
             range = ReadingVolume.of(model, taken, trim, listDeg, liquid.density());
         } else if (tank().isVoid()) {
             range = VolumeRange.of(0);
+        } else if (!Double.isNaN(pinned)) {
+            range = VolumeRange.of(pinned);
         } else {
-            range = new VolumeRange(Math.min(tank().residue(), tank().fillLimit()), tank().fillLimit(), List.of());
+            range = new VolumeRange(leastOpen(), tank().fillLimit(), List.of());
         }
         water = ReadingVolume.freeWater(model, taken, range.low(), trim, listDeg);
         fill(range.low(), trim);

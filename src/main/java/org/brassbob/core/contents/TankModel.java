@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 package org.brassbob.core.contents;
 
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 import org.brassbob.core.geometry.Attitude;
 import org.brassbob.core.geometry.Immersed;
 import org.brassbob.core.geometry.NetShape;
@@ -23,16 +25,16 @@ public final class TankModel {
     /** What two subtractions may do to a reading (m). */
     private static final double ROUNDING = 1e-9;
 
+    /** Trims (m) for which the greatest surface of a shape is worked out. */
+    private static final double TRIM_BETWEEN_KNOTS = 0.05;
+
     private final Tank tank;
     private final @Nullable NetShape shape;
     private final double lbp;
     private final double greatestInTable;
 
-    /** Rounds are worked out many times at one trim, and the search takes longer than all else of a tank. */
-    private volatile @Nullable AtTrim lastGreatest;
-
-    /** A second moment (m4) at a trim (m). */
-    private record AtTrim(double trim, double secondMoment) {}
+    /** By the number of the knot; the search takes far longer than all else of a tank, and rounds come at ever new trims. */
+    private final Map<Long, Double> greatestAtKnot = new ConcurrentHashMap<>();
 
     /**
      * A tank with its net shape.
@@ -184,20 +186,28 @@ public final class TankModel {
 
     /**
      * The greatest second moment (m4) of the surface between residue and the lesser of fill limit and 98 % (2008 IS Code part B 3.1.3),
-     * at a trim (m) where the shape serves.
+     * at a trim (m) where the shape serves. From a shape it is worked out every 5 cm of trim and read linearly between, as a table
+     * would be.
      */
     public double greatestSecondMoment(double trim) {
         if (tank.volumes() != null) {
             return greatestInTable;
         }
-        AtTrim known = lastGreatest;
-        if (known == null || known.trim != trim) {
-            Attitude attitude = Attitude.of(trim, lbp, 0);
-            double greatest = SurfaceRange.greatest(requiredShape(), attitude, tank.residue(), codeLimit(tank));
-            known = new AtTrim(trim, greatest);
-            lastGreatest = known;
+        double knots = trim / TRIM_BETWEEN_KNOTS;
+        long knot = Math.round(knots);
+        if (Math.abs(knots - knot) < ROUNDING) {
+            return greatestAtKnot(knot);
         }
-        return known.secondMoment;
+        long below = (long) Math.floor(knots);
+        double near = greatestAtKnot(below);
+        return near + (greatestAtKnot(below + 1) - near) * (knots - below);
+    }
+
+    private double greatestAtKnot(long knot) {
+        return greatestAtKnot.computeIfAbsent(knot, k -> {
+            Attitude attitude = Attitude.of(k * TRIM_BETWEEN_KNOTS, lbp, 0);
+            return SurfaceRange.greatest(requiredShape(), attitude, tank.residue(), codeLimit(tank));
+        });
     }
 
     /**

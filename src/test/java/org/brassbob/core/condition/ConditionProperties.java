@@ -157,7 +157,8 @@ class ConditionProperties {
 
     @Property(tries = 40, seed = SEED)
     void knowingLessNeverLooksBetterThoughTrimAndListFollow(@ForAll long seed) {
-        knowingLess(seed, 5, RoundBuilder.round(), 1e-6);
+        // She settles with 33 levels of the tank; what lies between them may cost a little more.
+        knowingLess(seed, 5, RoundBuilder.round(), 5e-4);
     }
 
     /** One tank loses its reading; against every reading that it could have had. */

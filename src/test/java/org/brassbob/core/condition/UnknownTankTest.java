@@ -238,6 +238,27 @@ class UnknownTankTest {
     }
 
     @Test
+    void levelThatMakesAnotherTankSlackByItsTrimIsFound() {
+        // The wide tank reads just over 98 % on even keel and counts as full. The unread tank is low: filling it alone
+        // makes her
+        // stiffer. But it is far aft, and by the stern the same reading in the after pipe means a slack wide tank.
+        ShipBuilder ship = ShipBuilder.ship()
+                .lightship(4000, 53.2226, 0, 6)
+                .tanks(
+                        TankBuilder.box("wide", 30, 50, -8, 8, 0, 4).pipe(30, 0, 0, 4),
+                        TankBuilder.box("aft", 2, 12, -1, 1, 0, 4));
+        Assessor assessor = ship.assessor();
+        RoundBuilder round = RoundBuilder.round().sounding("wide", 3.93);
+        Assessment unread = assessor.assess(round.build());
+        Assessment full = assessor.assess(round.volume("aft", 80).build());
+        Assessment empty = assessor.assess(round.volume("aft", 0).build());
+        assertEquals(TankState.FULL, empty.tanks().get(0).state());
+        assertEquals(TankState.SLACK, full.tanks().get(0).state());
+        assertTrue(full.condition().gm() < empty.condition().gm() - 0.5, "the trim costs her a great deal");
+        assertTrue(unread.condition().gm() <= full.condition().gm() + NO_BETTER);
+    }
+
+    @Test
     void fillLimitBelowTheResidueLeavesOneLevel() {
         Tank tank = doubleBottom().residue(20).fillLimitPct(1).build();
         Assessment assessment =

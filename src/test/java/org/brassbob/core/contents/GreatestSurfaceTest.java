@@ -103,6 +103,18 @@ class GreatestSurfaceTest {
         assertEquals(greatest, model.greatestSecondMoment(0), 1e-5 * greatest);
     }
 
+    @ParameterizedTest(name = "{0}")
+    @MethodSource("shapes")
+    void betweenTheTrimsWorkedOutItIsReadLinearly(String name, NetShape shape) {
+        TankModel model = new TankModel(
+                TankBuilder.tank("t").capacity(shape.capacity()).consumable().build(), shape, TankBuilder.LBP);
+        for (double trim : new double[] {0.63, -0.021, 1.7777}) {
+            Attitude attitude = Attitude.of(trim, TankBuilder.LBP, 0);
+            double exact = SurfaceRange.greatest(shape, attitude, 0, 0.98 * shape.capacity());
+            assertEquals(exact, model.greatestSecondMoment(trim), 1e-3 * exact);
+        }
+    }
+
     @Test
     void tableIsTakenAtItsRowsAndAtTheEndsOfTheRange() {
         double[] volumes = {0, 10, 20, 30, 40};

@@ -25,7 +25,9 @@ class CalibrationMakerTest {
     private static final double LBP = 84;
 
     private static SoundingTable made(Tank tank, NetShape shape) {
-        return new CalibrationMaker(LBP, CalibrationGrid.USUAL).soundings(tank, shape).orElseThrow();
+        return new CalibrationMaker(LBP, CalibrationGrid.USUAL)
+                .soundings(tank, shape)
+                .orElseThrow();
     }
 
     private static NetShape net(Tank tank) {
@@ -51,7 +53,8 @@ class CalibrationMakerTest {
             Pipe pipe = pipe(tank);
             for (int t = 0; t < table.trims().size(); t++) {
                 for (int h = 0; h < table.heels().size(); h++) {
-                    Attitude attitude = Attitude.of(table.trims().value(t), LBP, table.heels().value(h));
+                    Attitude attitude = Attitude.of(
+                            table.trims().value(t), LBP, table.heels().value(h));
                     for (int r = 0; r < table.readings().size(); r += 7) {
                         double depth = sounding(table, pipe, table.readings().value(r));
                         double z0 = attitude.heightThrough(pipe.x(), pipe.y(), pipe.footZ() + depth);
@@ -81,7 +84,8 @@ class CalibrationMakerTest {
                 double trim = -0.5 + 2.5 * random.nextDouble();
                 double list = -2 + 4 * random.nextDouble();
                 double reading = table.readings().first()
-                        + random.nextDouble() * (table.readings().last() - table.readings().first());
+                        + random.nextDouble()
+                                * (table.readings().last() - table.readings().first());
                 Attitude attitude = Attitude.of(trim, LBP, list);
                 double exact = shape.volumeBelow(
                         attitude,
@@ -107,16 +111,19 @@ class CalibrationMakerTest {
             SoundingTable table = made(tank, shape);
             Pipe pipe = pipe(tank);
             double first = Math.min(
-                    sounding(table, pipe, table.readings().first()), sounding(table, pipe, table.readings().last()));
+                    sounding(table, pipe, table.readings().first()),
+                    sounding(table, pipe, table.readings().last()));
             assertEquals(0, first, 1e-9, tank.id());
             double deepest = Math.max(
-                    sounding(table, pipe, table.readings().first()), sounding(table, pipe, table.readings().last()));
+                    sounding(table, pipe, table.readings().first()),
+                    sounding(table, pipe, table.readings().last()));
             for (int t = 0; t < table.trims().size(); t++) {
                 for (int h = 0; h < table.heels().size(); h++) {
                     double reading = table.argument() == SoundingTable.Argument.SOUNDING
                             ? table.readings().last()
                             : table.readings().first();
-                    double volume = table.volume(reading, table.trims().value(t), table.heels().value(h));
+                    double volume = table.volume(
+                            reading, table.trims().value(t), table.heels().value(h));
                     boolean toTheRim = deepest >= pipe.length() - 1e-4;
                     assertTrue(toTheRim || volume >= shape.capacity() - 1e-9, tank.id());
                 }
@@ -127,7 +134,9 @@ class CalibrationMakerTest {
     @Test
     void aTankWithoutAPipeHasNoSoundingTable() {
         Tank urea = HERON.tank("urea").orElseThrow();
-        assertTrue(new CalibrationMaker(LBP, CalibrationGrid.USUAL).soundings(urea, net(urea)).isEmpty());
+        assertTrue(new CalibrationMaker(LBP, CalibrationGrid.USUAL)
+                .soundings(urea, net(urea))
+                .isEmpty());
     }
 
     /** Between its rows a volume table errs by less than it promises, for every tank of the demo ship. */

@@ -89,7 +89,8 @@ class HydrostaticMakerTest {
             points.add(new Point(0, draught));
             list.add(new Station(length * i / stations, List.of(new Loop(1, points))));
         }
-        Solid hull = Shapes.solid(new SpaceShape(list, Origin.computed("wigley"))).mirroredBothSides();
+        Solid hull =
+                Shapes.solid(new SpaceShape(list, Origin.computed("wigley"))).mirroredBothSides();
         return new HydrostaticMaker(hull, DENSITY, length).entry(draught * (1 - 1e-9), 0);
     }
 
@@ -107,14 +108,18 @@ class HydrostaticMakerTest {
 
     @Test
     void tablesOfTheDemoHullUseRoundSteps() {
-        var heron = org.brassbob.data.VesselFolder.read(java.nio.file.Path.of("vessel-data/heron")).orElseThrow();
+        var heron = org.brassbob.data.VesselFolder.read(java.nio.file.Path.of("vessel-data/heron"))
+                .orElseThrow();
         SpaceShape hull = java.util.Objects.requireNonNull(heron.hull());
         HullTables tables = HullTables.of(heron, hull);
         HydrostaticTable.Rows rows = tables.hydrostatics().rows(0);
         assertEquals(0.5, rows.draughts().value(1) - rows.draughts().value(0), 1e-12);
         assertTrue(rows.draughts().last() <= 8.2);
-        assertTrue(tables.crossCurves().displacements().first() < heron.lightship().mass());
-        assertEquals(tables.crossCurves().displacements().size(), tables.requiredGm().displacements().size());
+        assertTrue(
+                tables.crossCurves().displacements().first() < heron.lightship().mass());
+        assertEquals(
+                tables.crossCurves().displacements().size(),
+                tables.requiredGm().displacements().size());
     }
 
     @Test

@@ -73,7 +73,9 @@ class RequiredGmTest {
     void initialGmGovernsAStiffCurve() {
         // KN grows so fast that every other criterion is met with KG at KM.
         Kn kn = heel -> 5 * Math.sin(heel) + 3 * heel * heel;
-        assertEquals(Criterion.INITIAL_GM, new RequiredGm(curves(kn)).governing(1500, 5).criterion());
+        assertEquals(
+                Criterion.INITIAL_GM,
+                new RequiredGm(curves(kn)).governing(1500, 5).criterion());
         assertEquals(5 - 0.15, greatestKg(kn, 5), 1e-12);
     }
 
@@ -96,8 +98,7 @@ class RequiredGmTest {
     @Test
     void theLimitCurveIsKmLessTheGreatestKg() {
         Kn kn = heel -> 6.2 * Math.sin(heel) + 0.35 * Math.sin(2 * heel);
-        LimitCurve curve =
-                new RequiredGm(curves(kn)).curve("general", Axis.of(1000, 2000), new double[] {6.9, 6.9});
+        LimitCurve curve = new RequiredGm(curves(kn)).curve("general", Axis.of(1000, 2000), new double[] {6.9, 6.9});
         assertEquals(6.9 - greatestKg(kn, 6.9), curve.at(1500), 1e-12);
         assertEquals(LimitCurve.Kind.GM_REQUIRED, curve.kind());
     }
