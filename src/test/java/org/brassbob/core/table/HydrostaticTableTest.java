@@ -82,18 +82,24 @@ class HydrostaticTableTest {
 
     @ParameterizedTest
     @CsvSource({
-        "1000, 0, false",
-        "1099, 0, false",
-        "1100, 0, true",
+        "999, 0, false",
+        "1000, 0, true",
+        "1000, 0.001, false",
+        "1100, 0.001, true",
         "3400, 0, true",
+        "3401, 0, false",
+        "3400, 1, true",
         "3401, 1, false",
-        "3400, 2, true",
+        "3401, 1.999, false",
+        "3401, 2, true",
+        "3500, 2, true",
+        "3501, 2, false",
         "2000, -0.001, false",
         "2000, 2.001, false",
         "1100, 1, true",
         "1099, 2, false"
     })
-    void coversOnlyWhatBothTrimsReach(double displacement, double trim, boolean covered) {
+    void coversWhatEachTrimThatIsReadReaches(double displacement, double trim, boolean covered) {
         assertEquals(covered, trimmed.covers(displacement, trim));
     }
 
