@@ -140,28 +140,14 @@ final class SectionCheck {
     }
 
     private Strip strip(int i, double aftX, double forwardX, Loop loop, Loop next) throws ShapeException {
-        List<Point> a = loop.points();
-        List<Point> b = next.points();
-        if (a.size() != b.size()) {
+        if (loop.points().size() != next.points().size()) {
             throw new ShapeException(
                     i + 1,
-                    where(i + 1, next.number()) + " has " + b.size() + " points; expected " + a.size()
-                            + " as at the station before");
+                    where(i + 1, next.number()) + " has " + next.points().size() + " points; expected "
+                            + loop.points().size() + " as at the station before");
         }
-        double aftArea = Section.area(a);
-        double forwardArea = Section.area(b);
-        boolean flatAft = Math.abs(aftArea) < NO_AREA;
-        boolean flatForward = Math.abs(forwardArea) < NO_AREA;
-        if (flatAft && flatForward) {
-            throw new ShapeException(
-                    i + 1, where(i + 1, next.number()) + " has no area here nor at the station before: degenerate");
-        }
-        if (!flatAft && !flatForward && aftArea * forwardArea < 0) {
-            throw new ShapeException(
-                    i + 1, where(i + 1, next.number()) + " runs the other way round than at the station before");
-        }
-        Strip strip = new Strip(loop.number(), aftX, forwardX, a, b);
-        Strip outer = (flatAft ? forwardArea : aftArea) > 0 ? strip : strip.reversed();
+        Strip strip = new Strip(loop.number(), aftX, forwardX, loop.points(), next.points());
+        Strip outer = runsFromYTowardsZ(i, strip) ? strip : strip.reversed();
         if (Section.area(outer.at(outer.leanest())) < NO_AREA) {
             throw strip.twisted(i + 1);
         }
@@ -172,6 +158,22 @@ final class SectionCheck {
                             + " starts at another corner than at the station before; expected matching points in the same order");
         }
         return outer;
+    }
+
+    private boolean runsFromYTowardsZ(int i, Strip strip) throws ShapeException {
+        double aftArea = Section.area(strip.aft());
+        double forwardArea = Section.area(strip.forward());
+        boolean flatAft = Math.abs(aftArea) < NO_AREA;
+        boolean flatForward = Math.abs(forwardArea) < NO_AREA;
+        if (flatAft && flatForward) {
+            throw new ShapeException(
+                    i + 1, where(i + 1, strip.number()) + " has no area here nor at the station before: degenerate");
+        }
+        if (!flatAft && !flatForward && aftArea * forwardArea < 0) {
+            throw new ShapeException(
+                    i + 1, where(i + 1, strip.number()) + " runs the other way round than at the station before");
+        }
+        return (flatAft ? forwardArea : aftArea) > 0;
     }
 
     /** How many other loops this one lies in half way; {@link SkinCheck} makes sure that it is so all the way. */

@@ -310,6 +310,23 @@ class SecondMomentTest {
     }
 
     @Test
+    void aSurfaceTooSmallToTellFromRoundingIsNone() {
+        // A nanometre of air in the corner of a tilted box: the surface is some 1e-16 m², what is left when 84 m²
+        // cancel.
+        Solid box = Shapes.box(20, 32, -3, 4, 1, 5);
+        Attitude attitude = new Attitude(0.02, 0.05);
+        Immersed i = box.below(attitude, box.highest(attitude) - 1e-9);
+        assertEquals(LiquidSurface.NONE, i.surface());
+        assertClose(336, i.volume());
+        // A tenth of a millimetre shows.
+        double side = 1e-4;
+        assertEquals(
+                side / 0.02 * side / 0.05 / 2,
+                surface(box, attitude, box.highest(attitude) - side).area() / Math.sqrt(1 + 0.0004 + 0.0025),
+                1e-12);
+    }
+
+    @Test
     void aFlatStepTakesTheAreaJustBelow() {
         // A top-hat section: 10 wide under z = 2, 4 wide over it; and the other way up.
         Solid hat = Shapes.prism(0, 1, loop(1, -5, 0, 5, 0, 5, 2, 2, 2, 2, 4, -2, 4, -2, 2, -5, 2));
