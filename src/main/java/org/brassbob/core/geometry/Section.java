@@ -46,17 +46,12 @@ final class Section {
         return false;
     }
 
-    /** Whether the first loop lies within the second, given that they do not cross: judged by the middles of its edges. */
+    /** Whether the first loop lies within the second, given that they do not cross: judged by a place well inside the first. */
     static boolean liesWithin(List<Point> inner, List<Point> outer) {
-        int inside = 0;
-        for (int i = 0; i < inner.size(); i++) {
-            Point a = inner.get(i);
-            Point b = inner.get((i + 1) % inner.size());
-            if (contains(outer, (a.y() + b.y()) / 2, (a.z() + b.z()) / 2)) {
-                inside++;
-            }
-        }
-        return 2 * inside > inner.size();
+        return new SectionRegion(List.of(inner))
+                .placeInside()
+                .map(place -> contains(outer, place.y(), place.z()))
+                .orElse(false);
     }
 
     private static boolean contains(List<Point> loop, double y, double z) {

@@ -2,7 +2,6 @@
 package org.brassbob.core.geometry;
 
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -24,16 +23,6 @@ final class SectionCheck {
         this.shape = shape;
     }
 
-    /**
-     * The part of a loop between two stations.
-     *
-     * @param aftX x of the after station
-     * @param forwardX x of the forward station
-     * @param aft its points at the after station
-     * @param forward as many points at the forward station
-     */
-    record Strip(double aftX, double forwardX, List<Point> aft, List<Point> forward) {}
-
     static List<Strip> check(SpaceShape shape) throws ShapeException {
         return new SectionCheck(shape).strips();
     }
@@ -44,7 +33,10 @@ final class SectionCheck {
             throw new ShapeException(0, "one station only; expected two or more");
         }
         for (int i = 0; i < stations.size(); i++) {
-            checkStation(i);
+            checkPosition(i);
+        }
+        for (int i = 0; i < stations.size(); i++) {
+            checkLoops(i);
         }
         List<Strip> strips = new ArrayList<>();
         for (int i = 0; i + 1 < stations.size(); i++) {
@@ -55,12 +47,8 @@ final class SectionCheck {
         return strips;
     }
 
-    private void checkStation(int i) throws ShapeException {
+    private void checkLoops(int i) throws ShapeException {
         Station station = shape.stations().get(i);
-        checkPosition(i);
-        if (station.loops().isEmpty()) {
-            throw new ShapeException(i, "no loop at x = " + station.x() + "; expected one or more");
-        }
         Map<Integer, Loop> byNumber = new TreeMap<>();
         for (Loop loop : station.loops()) {
             if (byNumber.put(loop.number(), loop) != null) {
@@ -81,6 +69,9 @@ final class SectionCheck {
     private void checkPosition(int i) throws ShapeException {
         List<Station> stations = shape.stations();
         double x = stations.get(i).x();
+        if (stations.get(i).loops().isEmpty()) {
+            throw new ShapeException(i, "no loop at x = " + x + "; expected one or more");
+        }
         if (i > 0 && stations.get(i - 1).x() > x) {
             throw new ShapeException(
                     i, "x = " + x + " after " + stations.get(i - 1).x() + "; expected ascending x");
@@ -128,93 +119,74 @@ final class SectionCheck {
         Station aft = shape.stations().get(i);
         Station forward = shape.stations().get(i + 1);
         List<Strip> raw = new ArrayList<>();
-        List<Integer> numbers = new ArrayList<>();
         for (Loop loop : aft.loops()) {
             for (Loop next : forward.loops()) {
                 if (next.number() == loop.number()) {
                     raw.add(strip(i, aft.x(), forward.x(), loop, next));
-                    numbers.add(loop.number());
                 }
             }
         }
-        List<Strip> turned = new ArrayList<>();
-        for (int a = 0; a < raw.size(); a++) {
-            turned.add(depth(i, raw, numbers, a) % 2 == 0 ? raw.get(a) : reversed(raw.get(a)));
+        if (raw.isEmpty()) {
+            throw new ShapeException(
+                    i + 1,
+                    "no loop at x = " + forward.x() + " joins one at x = " + aft.x() + ": the shape is in two parts");
         }
+        List<Strip> turned = new ArrayList<>();
+        for (Strip strip : raw) {
+            turned.add(depth(strip, raw) % 2 == 0 ? strip : strip.reversed());
+        }
+        new SkinCheck(i, turned).check();
         return turned;
     }
 
     private Strip strip(int i, double aftX, double forwardX, Loop loop, Loop next) throws ShapeException {
-        List<Point> a = loop.points();
-        List<Point> b = next.points();
-        if (a.size() != b.size()) {
+        if (loop.points().size() != next.points().size()) {
             throw new ShapeException(
                     i + 1,
-                    where(i + 1, next.number()) + " has " + b.size() + " points; expected " + a.size()
-                            + " as at the station before");
+                    where(i + 1, next.number()) + " has " + next.points().size() + " points; expected "
+                            + loop.points().size() + " as at the station before");
         }
-        double aftArea = Section.area(a);
-        double forwardArea = Section.area(b);
+        Strip strip = new Strip(loop.number(), aftX, forwardX, loop.points(), next.points());
+        Strip outer = runsFromYTowardsZ(i, strip) ? strip : strip.reversed();
+        if (Section.area(outer.at(outer.leanest())) < NO_AREA) {
+            throw strip.twisted(i + 1);
+        }
+        if (strip.startsElsewhere()) {
+            throw new ShapeException(
+                    i + 1,
+                    where(i + 1, next.number())
+                            + " starts at another corner than at the station before; expected matching points in the same order");
+        }
+        return outer;
+    }
+
+    private boolean runsFromYTowardsZ(int i, Strip strip) throws ShapeException {
+        double aftArea = Section.area(strip.aft());
+        double forwardArea = Section.area(strip.forward());
         boolean flatAft = Math.abs(aftArea) < NO_AREA;
         boolean flatForward = Math.abs(forwardArea) < NO_AREA;
         if (flatAft && flatForward) {
             throw new ShapeException(
-                    i + 1, where(i + 1, next.number()) + " has no area here nor at the station before: degenerate");
+                    i + 1, where(i + 1, strip.number()) + " has no area here nor at the station before: degenerate");
         }
         if (!flatAft && !flatForward && aftArea * forwardArea < 0) {
             throw new ShapeException(
-                    i + 1, where(i + 1, next.number()) + " runs the other way round than at the station before");
+                    i + 1, where(i + 1, strip.number()) + " runs the other way round than at the station before");
         }
-        Strip strip = new Strip(aftX, forwardX, a, b);
-        if (Section.crossesItself(middle(strip))) {
-            throw new ShapeException(
-                    i + 1,
-                    where(i + 1, next.number()) + " does not match the station before point by point: "
-                            + "the skin crosses itself between them");
-        }
-        return (flatAft ? forwardArea : aftArea) > 0 ? strip : reversed(strip);
+        return (flatAft ? forwardArea : aftArea) > 0;
     }
 
-    /** How many other loops this one lies in, which must be the same wherever the loops have an area. */
-    private int depth(int i, List<Strip> strips, List<Integer> numbers, int a) throws ShapeException {
+    /** How many other loops this one lies in half way; {@link SkinCheck} makes sure that it is so all the way. */
+    private static int depth(Strip strip, List<Strip> strips) {
+        List<Point> inner = strip.at(0.5);
         int depth = 0;
-        for (int b = 0; b < strips.size(); b++) {
-            if (b == a) {
-                continue;
-            }
-            List<Point> inner = middle(strips.get(a));
-            List<Point> outer = middle(strips.get(b));
-            if (Section.crossEachOther(inner, outer)) {
-                throw new ShapeException(
-                        i + 1,
-                        where(i + 1, numbers.get(a)) + " and loop " + numbers.get(b)
-                                + " cross between this station and the one before");
-            }
-            if (Section.liesWithin(inner, outer) && Math.abs(Section.area(inner)) < Math.abs(Section.area(outer))) {
+        for (Strip other : strips) {
+            List<Point> outer = other.at(0.5);
+            if (Math.abs(Section.area(inner)) < Math.abs(Section.area(outer)) && Section.liesWithin(inner, outer)) {
                 depth++;
             }
         }
         return depth;
-    }
-
-    private static List<Point> middle(Strip strip) {
-        List<Point> middle = new ArrayList<>();
-        for (int i = 0; i < strip.aft().size(); i++) {
-            Point a = strip.aft().get(i);
-            Point b = strip.forward().get(i);
-            middle.add(new Point((a.y() + b.y()) / 2, (a.z() + b.z()) / 2));
-        }
-        return middle;
-    }
-
-    private static Strip reversed(Strip strip) {
-        return new Strip(strip.aftX(), strip.forwardX(), reversed(strip.aft()), reversed(strip.forward()));
-    }
-
-    private static List<Point> reversed(List<Point> points) {
-        List<Point> turned = new ArrayList<>(points);
-        Collections.reverse(turned);
-        return turned;
     }
 
     private String where(int station, int loop) {

@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import org.brassbob.core.geometry.SectionCheck.Strip;
 import org.brassbob.core.geometry.SpaceShape.Point;
 
 /** Lays the triangles of a skin between stations that have been checked. */

@@ -55,14 +55,15 @@ final class SkinCut {
 
     /** Only corner a is dry: the quad that remains below it, as two triangles. */
     private void addRoot(Sums sums, int a, int b, int c) {
-        double s = h[a] / (h[a] - h[b]);
-        double t = h[a] / (h[a] - h[c]);
-        double abX = along(x, a, b, s);
-        double abY = along(y, a, b, s);
+        double s = h[b] / (h[b] - h[a]);
+        double t = h[c] / (h[c] - h[a]);
+        double abX = along(x, b, a, s);
+        double abY = along(y, b, a, s);
         sums.add(abX, abY, 0, x[b], y[b], h[b], x[c], y[c], h[c]);
-        sums.add(abX, abY, 0, x[c], y[c], h[c], along(x, a, c, t), along(y, a, c, t), 0);
+        sums.add(abX, abY, 0, x[c], y[c], h[c], along(x, c, a, t), along(y, c, a, t), 0);
     }
 
+    /** From the wet corner on: facets either side of an edge then cut it at the same place to the last digit, and little remains exact. */
     private static double along(double[] from, int a, int b, double f) {
         return from[a] + (from[b] - from[a]) * f;
     }

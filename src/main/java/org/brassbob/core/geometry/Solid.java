@@ -33,8 +33,8 @@ public final class Solid {
     /**
      * The solid that the sections describe.
      *
-     * @throws ShapeException if they describe no solid: too few stations or points, a loop that crosses itself or another, that turns
-     *     over, that has no thickness, or that joins nothing
+     * @throws ShapeException if they describe no solid: too few stations or points, loops that cross or overlap themselves or each
+     *     other at a station or on the way to the next, that turn over, begin at another corner, have no thickness, or join nothing
      */
     public static Solid of(SpaceShape shape) throws ShapeException {
         return new SkinBuilder(SectionCheck.check(shape)).solid();

@@ -39,12 +39,13 @@ public final class HydrostaticTable {
         return sets.get(trim);
     }
 
-    /** Whether the table reaches this displacement (t, in the table's water) at this trim (m). */
+    /** Whether the table reaches this displacement (t, in the table's water) at this trim (m): at each trim that is read for it. */
     public boolean covers(double displacement, double trim) {
         int i = trims.cell(trim);
+        double f = trims.fraction(trim, i);
         return trims.covers(trim)
-                && sets.get(i).displacements.covers(displacement)
-                && sets.get(trims.above(i)).displacements.covers(displacement);
+                && (f == 1 || sets.get(i).displacements.covers(displacement))
+                && (f == 0 || sets.get(trims.above(i)).displacements.covers(displacement));
     }
 
     /**
