@@ -44,17 +44,21 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
             km[i] = hydrostatics.atDisplacement(displacements.value(i)).kmt();
         }
         return new HullTables(
-                hydrostatics(vessel, half),
+                hydrostatics(vessel, half, DRAUGHTS),
                 curves,
                 new RequiredGm(curves).curve("general criteria, 2008 IS Code part A 2.2", displacements, km));
     }
 
-    /** The hydrostatic table alone. */
-    public static HydrostaticTable hydrostatics(Vessel vessel, SpaceShape half) {
+    /**
+     * The hydrostatic table alone.
+     *
+     * @param rows about how many draughts at the most
+     */
+    public static HydrostaticTable hydrostatics(Vessel vessel, SpaceShape half, int rows) {
         Solid hull = bothSides(half);
         return new HydrostaticMaker(
                         hull, vessel.seaDensity(), vessel.particulars().lbp())
-                .table(draughts(hull), Axis.of(0));
+                .table(draughts(hull, rows), Axis.of(0));
     }
 
     /** The whole hull. */
@@ -66,10 +70,10 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         }
     }
 
-    private static Axis draughts(Solid hull) {
+    private static Axis draughts(Solid hull, int rows) {
         double keel = hull.bounds().minZ();
         double depth = hull.bounds().maxZ();
-        double step = RoundSteps.atLeast((depth - Math.max(0, keel)) / DRAUGHTS);
+        double step = RoundSteps.atLeast((depth - Math.max(0, keel)) / rows);
         int first = (int) Math.floor(Math.max(0, keel) / step) + 1;
         int last = (int) Math.floor(depth / step + 1e-9);
         double[] draughts = new double[last - first + 1];
