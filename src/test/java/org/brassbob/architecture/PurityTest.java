@@ -2,6 +2,9 @@
 package org.brassbob.architecture;
 
 import static com.tngtech.archunit.base.DescribedPredicate.describe;
+import static com.tngtech.archunit.base.DescribedPredicate.not;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.assignableTo;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideInAPackage;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.fields;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noFields;
@@ -16,8 +19,7 @@ import java.util.Date;
 import java.util.Locale;
 import java.util.Random;
 import java.util.Set;
-import java.util.concurrent.Executor;
-import java.util.concurrent.Future;
+import java.util.concurrent.ConcurrentMap;
 import java.util.concurrent.ThreadLocalRandom;
 import org.junit.jupiter.api.Test;
 
@@ -104,11 +106,9 @@ class PurityTest {
                 .dependOnClassesThat()
                 .areAssignableTo(Thread.class)
                 .orShould()
-                .dependOnClassesThat()
-                .areAssignableTo(Executor.class)
-                .orShould()
-                .dependOnClassesThat()
-                .areAssignableTo(Future.class)
+                .dependOnClassesThat(resideInAPackage("java.util.concurrent..")
+                        .and(not(assignableTo(ConcurrentMap.class)))
+                        .as("are of java.util.concurrent, but for maps"))
                 .orShould()
                 .accessTargetWhere(describe(
                         "runs a stream in parallel",
