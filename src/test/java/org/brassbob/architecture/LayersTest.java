@@ -122,7 +122,7 @@ class LayersTest {
                 .whereLayer("contents")
                 .mayOnlyAccessLayers("figures", "ship")
                 .whereLayer("condition")
-                .mayOnlyAccessLayers("figures", "ship", "contents")
+                .mayOnlyAccessLayers("figures", "ship", "contents", "tabulate")
                 .whereLayer("tabulate")
                 .mayOnlyAccessLayers("figures", "ship", "contents")
                 .whereLayer("audit")

@@ -10,7 +10,11 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.brassbob.core.table.HydrostaticTable;
+import org.brassbob.core.tabulate.HullTables;
+import org.brassbob.core.vessel.Vessel;
 import org.brassbob.data.MemoryFolder;
+import org.brassbob.data.TableFiles;
 import org.brassbob.data.VesselFolder;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -171,6 +175,23 @@ class AuditTest {
         lines[12] = String.join(",", cells);
         assertFound(
                 findings(bare.with("kn.csv", String.join("\n", lines))), "kn.csv:13: error: KN against KM·sin φ at 5°");
+    }
+
+    /** Where the waterline meets a transom or a chine, columns kink: smoothness alone must not condemn a correct table. */
+    @ParameterizedTest
+    @CsvSource({"20", "32", "41", "60"})
+    void finerHydrostaticsWithoutAHullRaiseNoError(int rows) throws IOException {
+        Vessel heron = VesselFolder.read(HERON).orElseThrow();
+        HydrostaticTable finer = HullTables.hydrostatics(heron, java.util.Objects.requireNonNull(heron.hull()), rows);
+        Path folder = java.nio.file.Files.createTempDirectory("hydrostatics");
+        new TableFiles(folder).write("hydrostatics.csv", finer);
+        String csv = java.nio.file.Files.readString(folder.resolve("hydrostatics.csv"));
+        java.nio.file.Files.delete(folder.resolve("hydrostatics.csv"));
+        java.nio.file.Files.delete(folder);
+        List<String> errors = findings(HERON.without("hull.shape.csv").with("hydrostatics.csv", csv)).stream()
+                .filter(f -> f.contains(": error: "))
+                .toList();
+        assertEquals(List.of(), errors);
     }
 
     @Test
