@@ -19,7 +19,9 @@ import org.brassbob.core.table.Origin;
  * {@code KN = (yB + c²·q·zB)/√(1 + c²·q²)}; without trim, {@code yB·cos φ + zB·sin φ}.
  */
 public final class CrossCurveMaker {
-    private static final double STEEPEST_TRIM = 0.3;
+    /** Beyond any trim: with the surface all but athwart, the centre of buoyancy is as far aft, or forward, as it can be. */
+    private static final double STEEPEST_TRIM = 1000;
+
     private static final double SETTLED = 1e-9;
 
     private final Solid hull;

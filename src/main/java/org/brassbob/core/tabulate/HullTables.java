@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 package org.brassbob.core.tabulate;
 
+import java.util.stream.IntStream;
 import org.brassbob.core.geometry.Attitude;
 import org.brassbob.core.geometry.ShapeException;
 import org.brassbob.core.geometry.Solid;
@@ -24,8 +25,20 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
     private static final int DISPLACEMENTS = 28;
     private static final Axis HEELS = Axis.of(5, 10, 15, 20, 25, 30, 35, 40, 50, 60);
 
+    /** The heels of the required GM: every degree to 40°, for the angle of the greatest lever is judged on them. */
+    private static final Axis CLOSE_HEELS =
+            Axis.of(IntStream.concat(IntStream.rangeClosed(1, 40), IntStream.of(45, 50, 55, 60))
+                    .mapToDouble(heel -> heel)
+                    .toArray());
+
     /** How far beyond light ship and summer draught the cross curves reach, as a share. */
     private static final double BEYOND = 0.05;
+
+    /** As deep as she is tabulated, as a share of the whole hull's buoyancy. */
+    private static final double MOST_AFLOAT = 0.95;
+
+    /** The least displacement is at most this share of the greatest. */
+    private static final double NARROWEST = 0.9;
 
     /**
      * The tables of a ship's hull.
@@ -38,15 +51,16 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         HydrostaticMaker hydrostatics = new HydrostaticMaker(
                 hull, vessel.seaDensity(), vessel.particulars().lbp());
         Axis displacements = displacements(vessel, hull);
-        CrossCurves curves = new CrossCurveMaker(hull, vessel.seaDensity()).curves(displacements, HEELS);
+        CrossCurveMaker crossCurves = new CrossCurveMaker(hull, vessel.seaDensity());
         double[] km = new double[displacements.size()];
         for (int i = 0; i < km.length; i++) {
             km[i] = hydrostatics.atDisplacement(displacements.value(i)).kmt();
         }
         return new HullTables(
                 hydrostatics(vessel, half, DRAUGHTS),
-                curves,
-                new RequiredGm(curves).curve("general criteria, 2008 IS Code part A 2.2", displacements, km));
+                crossCurves.curves(displacements, HEELS),
+                new RequiredGm(crossCurves.curves(displacements, CLOSE_HEELS))
+                        .curve("general criteria, 2008 IS Code part A 2.2", displacements, km));
     }
 
     /**
@@ -58,7 +72,7 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         Solid hull = bothSides(half);
         return new HydrostaticMaker(
                         hull, vessel.seaDensity(), vessel.particulars().lbp())
-                .table(draughts(hull, rows), Axis.of(0));
+                .table(draughts(hull, vessel.particulars().depth(), rows), Axis.of(0));
     }
 
     /** The whole hull. */
@@ -70,13 +84,15 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         }
     }
 
-    private static Axis draughts(Solid hull, int rows) {
+    /** Round draughts from the keel to the depth, or to the top of the hull where that is lower. */
+    private static Axis draughts(Solid hull, double mouldedDepth, int rows) {
         double keel = hull.bounds().minZ();
-        double depth = hull.bounds().maxZ();
+        double top = hull.bounds().maxZ();
+        double depth = mouldedDepth > keel ? Math.min(mouldedDepth, top) : top;
         double step = RoundSteps.atLeast((depth - Math.max(0, keel)) / rows);
         int first = (int) Math.floor(Math.max(0, keel) / step) + 1;
-        // At the deck there is no waterplane left: the last row stands below it.
-        int last = (int) Math.ceil(depth / step - 1e-9) - 1;
+        // At the top of the hull there is no waterplane left: the last row stands below it.
+        int last = depth < top ? (int) Math.floor(depth / step + 1e-9) : (int) Math.ceil(top / step - 1e-9) - 1;
         double[] draughts = new double[last - first + 1];
         for (int i = 0; i < draughts.length; i++) {
             draughts[i] = RoundSteps.multiple(first + i, step);
@@ -84,15 +100,17 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         return Axis.of(draughts);
     }
 
+    /** Round displacements about the range between light ship and summer draught, whichever is the heavier, as far as the hull floats. */
     private static Axis displacements(Vessel vessel, Solid hull) {
-        double least = vessel.lightship().mass() * (1 - BEYOND);
-        double most = vessel.seaDensity()
-                * hull.volumeBelow(Attitude.UPRIGHT, vessel.particulars().summerDraught())
-                * (1 + BEYOND);
-        double whole = vessel.seaDensity() * hull.volume();
+        double light = vessel.lightship().mass();
+        double summer = vessel.seaDensity()
+                * hull.volumeBelow(Attitude.UPRIGHT, vessel.particulars().summerDraught());
+        double deepest = MOST_AFLOAT * vessel.seaDensity() * hull.volume();
+        double most = Math.min(Math.max(light, summer) * (1 + BEYOND), deepest);
+        double least = Math.min(Math.min(light, summer) * (1 - BEYOND), NARROWEST * most);
         double step = RoundSteps.atLeast((most - least) / DISPLACEMENTS);
         int first = Math.max(1, (int) Math.floor(least / step));
-        int last = Math.max(first + 1, (int) Math.min(Math.ceil(most / step), Math.floor(0.95 * whole / step)));
+        int last = (int) Math.min(Math.ceil(most / step), Math.floor(deepest / step));
         double[] displacements = new double[last - first + 1];
         for (int i = 0; i < displacements.length; i++) {
             displacements[i] = RoundSteps.multiple(first + i, step);

@@ -16,6 +16,8 @@ import org.brassbob.core.table.Origin;
  * GM long as hydrostatic tables commonly do (common practice: KB − KG is a few metres where BM long is the ship's length or more).
  */
 public final class HydrostaticMaker {
+    private static final double JUST_UNDER = 1e-9;
+
     private final Solid hull;
     private final double density;
     private final double lbp;
@@ -51,15 +53,19 @@ public final class HydrostaticMaker {
         return HydrostaticTable.of(trims, sets);
     }
 
-    /** The particulars at a draught at the centre of flotation (m) and a trim (m). */
+    /**
+     * The particulars at a draught at the centre of flotation (m) and a trim (m). From the top of the hull upwards those just under the
+     * top, where the surface still is one; at the lowest point of the keel and under it, where nothing is immersed, all but the
+     * displacement are NaN or 0.
+     */
     public Entry entry(double draught, double trim) {
         Attitude attitude = Attitude.of(trim, lbp, 0);
         double z0 = attitude.heightThrough(lbp / 2, 0, draught);
-        Immersed below = hull.below(attitude, z0);
+        Immersed below = below(attitude, z0);
         // The surface's centroid moves with the surface; a few passes settle where the draught is measured.
         for (int i = 0; i < 50 && trim != 0; i++) {
             double next = attitude.heightThrough(below.surface().x(), 0, draught);
-            below = hull.below(attitude, next);
+            below = below(attitude, next);
             if (Math.abs(next - z0) < 1e-9) {
                 break;
             }
@@ -72,6 +78,11 @@ public final class HydrostaticMaker {
     public Entry atDisplacement(double displacement) {
         double draught = hull.heightFor(Attitude.UPRIGHT, displacement / density);
         return entry(hull.below(Attitude.UPRIGHT, draught), draught);
+    }
+
+    private Immersed below(Attitude attitude, double z0) {
+        double top = hull.highest(attitude);
+        return hull.below(attitude, Math.min(z0, top - JUST_UNDER * (top - hull.lowest(attitude))));
     }
 
     private Entry entry(Immersed below, double draught) {

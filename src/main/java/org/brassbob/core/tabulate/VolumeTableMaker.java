@@ -20,6 +20,9 @@ public final class VolumeTableMaker {
     /** Linear reading is near enough within this share of the greatest second moment. */
     private static final double MOMENT_TOLERANCE = 0.005;
 
+    /** Either side of a corner (m). */
+    private static final double NEAR = 1e-6;
+
     private static final int FIRST_ROWS = 8;
     private static final int DEEPEST = 5;
 
@@ -71,19 +74,32 @@ public final class VolumeTableMaker {
         double capacity = shape.capacity();
         add(0);
         add(capacity);
-        for (double height : shape.solid().cornerHeights(Attitude.UPRIGHT)) {
-            double volume = shape.volumeBelow(Attitude.UPRIGHT, height);
-            add(volume);
-            double below =
-                    shape.below(Attitude.UPRIGHT, height - 1e-6).surface().transverse();
-            double above =
-                    shape.below(Attitude.UPRIGHT, height + 1e-6).surface().transverse();
-            if (Math.abs(above - below) > MOMENT_TOLERANCE * scale && volume > 0 && volume < capacity) {
-                add(volume + 4 * VOLUME_STEP);
+        double[] corners = shape.solid().cornerHeights(Attitude.UPRIGHT);
+        for (double height : corners) {
+            if (jumpsAt(height)) {
+                addBesideJump(shape.volumeBelow(Attitude.UPRIGHT, height));
             }
+        }
+        for (double height : corners) {
+            add(shape.volumeBelow(Attitude.UPRIGHT, height));
         }
         for (int i = 1; i < FIRST_ROWS; i++) {
             add(capacity * i / FIRST_ROWS);
+        }
+    }
+
+    private boolean jumpsAt(double height) {
+        double below = shape.below(Attitude.UPRIGHT, height - NEAR).surface().transverse();
+        double above = shape.below(Attitude.UPRIGHT, height + NEAR).surface().transverse();
+        return Math.abs(above - below) > MOMENT_TOLERANCE * scale;
+    }
+
+    /** Rounding must not carry a row over to the other side of the jump: the next steps of volume but one, down and up. */
+    private void addBesideJump(double volume) {
+        double step = volume / VOLUME_STEP;
+        if (volume > 0 && volume < shape.capacity()) {
+            add((Math.ceil(step - 1e-6) - 2) * VOLUME_STEP);
+            add((Math.floor(step + 1e-6) + 2) * VOLUME_STEP);
         }
     }
 
