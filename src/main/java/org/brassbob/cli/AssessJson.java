@@ -46,8 +46,8 @@ final class AssessJson {
                 .sorted(Comparator.comparing(OffsetDateTime::toInstant))
                 .toList();
         json.put("file", assessment.round().name())
-                .put("taken_from", times.get(0).toString())
-                .put("taken_to", times.get(times.size() - 1).toString());
+                .put("taken_from", Times.iso(times.get(0)))
+                .put("taken_to", Times.iso(times.get(times.size() - 1)));
     }
 
     private static void tank(JsonText json, TankFigures tank) throws IOException {
@@ -60,7 +60,7 @@ final class AssessJson {
         } else {
             json.object("reading", r -> r.put("kind", reading.kind().code())
                     .put("value", reading.value())
-                    .put("at", reading.at().toString())
+                    .put("at", Times.iso(reading.at()))
                     .put("age_h", tank.ageHours()));
         }
         json.put("volume_m3", tank.volume())

@@ -2,12 +2,12 @@
 package org.brassbob.cli;
 
 import java.time.OffsetDateTime;
-import java.time.format.DateTimeFormatter;
 import java.util.Comparator;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import java.util.stream.Collectors;
 import org.brassbob.core.condition.Assessment;
 import org.brassbob.core.condition.Condition;
 import org.brassbob.core.condition.Margin;
@@ -21,9 +21,7 @@ import org.brassbob.core.round.ReadingKind;
 
 /** An assessment as a page of text, the verdict last, where the eye of somebody at a terminal is. */
 final class AssessText {
-    private static final DateTimeFormatter TIME = DateTimeFormatter.ofPattern("d MMM yyyy HH:mm xxx", Locale.ENGLISH);
-
-    /** From so many on, notes of one kind are told once. */
+    /** From so many on, notices of one kind are told once. */
     private static final int MANY = 4;
 
     private final Assessment assessment;
@@ -53,7 +51,7 @@ final class AssessText {
                 .sorted(Comparator.comparing(OffsetDateTime::toInstant))
                 .toList();
         line("%s: %s", assessment.vessel().name(), assessment.round().name());
-        line("readings from %s to %s", TIME.format(times.get(0)), TIME.format(times.get(times.size() - 1)));
+        line("readings from %s to %s", Times.plain(times.get(0)), Times.plain(times.get(times.size() - 1)));
         line("data %s", assessment.vessel().dataSha256().substring(0, 16));
         assessment.vessel().sources().stream()
                 .filter(s -> s.toLowerCase(Locale.ROOT).contains("demo"))
@@ -166,12 +164,11 @@ final class AssessText {
             List<Notice> alike = assessment.notices().stream()
                     .filter(n -> n.code() == notice.code())
                     .toList();
-            if (alike.size() < MANY || notice.severity() != Severity.NOTE) {
+            if (alike.size() < MANY || notice.severity() == Severity.STOP) {
                 line("  %-8s%s: %s", notice.severity().code(), about(notice), notice.text());
             } else if (told.add(notice.code())) {
-                line(
-                        "  %-8s%d tanks alike, of which %s: %s",
-                        notice.severity().code(), alike.size(), about(notice), notice.text());
+                String names = alike.stream().map(this::about).collect(Collectors.joining(", "));
+                line("  %-8s%s: alike, the first: %s", notice.severity().code(), names, notice.text());
             }
         }
         line("");

@@ -5,11 +5,17 @@ import com.tngtech.archunit.core.domain.JavaClasses;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
 
-/** The product's own classes. */
+/** The classes that the rules judge. */
 final class Classes {
-    static final JavaClasses MAIN = new ClassFileImporter()
-            .withImportOption(ImportOption.Predefined.DO_NOT_INCLUDE_TESTS)
-            .importPackages("org.brassbob");
+    /** The product's own classes. */
+    static final JavaClasses MAIN = imported(ImportOption.Predefined.DO_NOT_INCLUDE_TESTS);
+
+    /** The tests, their fixtures and benchmarks. */
+    static final JavaClasses TESTS = imported(ImportOption.Predefined.ONLY_INCLUDE_TESTS);
 
     private Classes() {}
+
+    private static JavaClasses imported(ImportOption which) {
+        return new ClassFileImporter().withImportOption(which).importPackages("org.brassbob");
+    }
 }

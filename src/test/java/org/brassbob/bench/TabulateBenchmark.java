@@ -34,8 +34,8 @@ import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
 
 /**
- * Full calibration of a ship, 300 readings × 9 trims for each tank, in one thread and in all; once for 42 random tanks, once for the
- * demo ship. Then what {@code tabulate} makes besides.
+ * Full calibration of 42 random tanks, 300 readings × 9 trims each, in one thread and in all; and the demo ship's volume tables and the
+ * tables of her hull. Her own full calibration is in {@link DemoShipBenchmark}.
  */
 @BenchmarkMode(Mode.SingleShotTime)
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
@@ -80,30 +80,20 @@ public class TabulateBenchmark {
         return Objects.requireNonNull(shapes.get(tank.id()));
     }
 
-    private List<SoundingTable> calibrate(List<Tank> tanks, boolean together) {
-        var stream = together ? tanks.parallelStream() : tanks.stream();
+    private List<SoundingTable> calibrate(boolean together) {
+        var stream = together ? random.parallelStream() : random.stream();
         return stream.flatMap(tank -> maker.soundings(tank, shape(tank)).stream())
                 .toList();
     }
 
     @Benchmark
     public List<SoundingTable> randomTanksOneThread() {
-        return calibrate(random, false);
+        return calibrate(false);
     }
 
     @Benchmark
     public List<SoundingTable> randomTanksAllThreads() {
-        return calibrate(random, true);
-    }
-
-    @Benchmark
-    public List<SoundingTable> demoShipOneThread() {
-        return calibrate(demo, false);
-    }
-
-    @Benchmark
-    public List<SoundingTable> demoShipAllThreads() {
-        return calibrate(demo, true);
+        return calibrate(true);
     }
 
     @Benchmark

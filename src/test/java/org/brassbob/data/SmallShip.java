@@ -33,6 +33,7 @@ final class SmallShip {
                 .with("tanks/wb-s.volume.csv", volumes(2))
                 .with("tanks/fo.shape.csv", box(4, 10, -3, 3, 0.2, 2.4))
                 .with("tanks/lo.shape.csv", box(6, 8, -1, 1, 0.5, 1.5))
+                .with("hull.shape.csv", box(0, 40, 0, 4, 0, 3))
                 .with("tanks/coff.shape.csv", box(10, 10.6, -3, 3, 0.2, 2.4));
     }
 

@@ -172,6 +172,16 @@ class VesselFolderTest {
     }
 
     @Test
+    void withoutHydrostaticsTheHullServes() {
+        Vessel barge = VesselFolder.read(SmallShip.folder().without("hydrostatics.csv"))
+                .orElseThrow();
+        assertNull(barge.hydrostatics());
+        assertEquals(
+                List.of("hydrostatics.csv:1: no such file; expected it, or hull.shape.csv to work it out from"),
+                faults(SmallShip.folder().without("hydrostatics.csv").without("hull.shape.csv")));
+    }
+
+    @Test
     void otherFilesAreNobodysBusiness() {
         assertNotNull(VesselFolder.read(SmallShip.folder().with("plan.csv", "x").with("notes.txt", "y"))
                 .value());
@@ -224,7 +234,7 @@ class VesselFolderTest {
                 VesselFolder.read(good.with("weights.csv", changed))
                         .orElseThrow()
                         .dataSha256());
-        assertEquals(14, VesselFolder.fingerprints(good).size());
+        assertEquals(15, VesselFolder.fingerprints(good).size());
     }
 
     /** The seam of two stations whose rows run on: a tank that jumps from 2 m to 1 m of height, its end stepping down by a corner. */

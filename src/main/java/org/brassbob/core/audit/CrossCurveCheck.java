@@ -96,10 +96,13 @@ final class CrossCurveCheck {
             double[] errors = Series.errors(displacements, column);
             for (int row = 0; row < errors.length; row++) {
                 if (errors[row] != 0) {
-                    report(
+                    findings.doubt(
+                            Math.abs(errors[row]) > CODE_TOLERANCE,
+                            curves.origin(),
                             row,
-                            h,
-                            "KN out of line with its neighbours",
+                            "KN out of line with its neighbours at "
+                                    + show(curves.heels().value(h)) + "°",
+                            show(column[row]) + " m",
                             "about " + show(column[row] - errors[row]) + " m");
                 }
             }

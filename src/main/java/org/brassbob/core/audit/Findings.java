@@ -19,6 +19,11 @@ final class Findings {
         add(Finding.Severity.WARNING, origin, row, what, figure, expected);
     }
 
+    /** Something that only the column's own run speaks against: an error where it is beyond what the code tolerates, else a doubt. */
+    void doubt(boolean grave, Origin origin, int row, String what, String figure, String expected) {
+        add(grave ? Finding.Severity.ERROR : Finding.Severity.WARNING, origin, row, what, figure, expected);
+    }
+
     private void add(Finding.Severity severity, Origin origin, int row, String what, String figure, String expected) {
         found.add(new Finding(severity, origin.file(), Math.max(1, origin.line(row)), what, figure, expected));
     }

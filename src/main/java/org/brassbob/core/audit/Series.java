@@ -13,6 +13,9 @@ final class Series {
     private static final double OUTSTANDING = 4;
     private static final double LEAST_UNITS = 3;
 
+    /** Millimetres and litres: a column that happens to hold whole numbers is not therefore written to the metre. */
+    private static final double FINEST = 0.001;
+
     private final double[] x;
     private final double[] bends;
     private final double unit;
@@ -32,7 +35,7 @@ final class Series {
         if (x.length < 6) {
             return errors;
         }
-        Series series = new Series(x, y, Precision.of(y));
+        Series series = new Series(x, y, Math.min(FINEST, Precision.of(y)));
         for (int i = 2; i + 2 < x.length; i++) {
             errors[i] = series.errorAt(i);
         }

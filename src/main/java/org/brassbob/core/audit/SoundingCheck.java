@@ -134,9 +134,12 @@ final class SoundingCheck {
         double[] errors = Series.errors(x, y);
         for (int i = 0; i < errors.length; i++) {
             if (errors[i] != 0) {
-                report(
+                findings.doubt(
+                        Math.abs(errors[i]) > CODE_TOLERANCE * tank.capacity(),
+                        table.origin(),
                         line.node(i),
                         "volume out of line with its neighbours",
+                        show(y[i]) + " m3",
                         "about " + show(y[i] - errors[i]) + " m3");
             }
         }

@@ -3,6 +3,7 @@ package org.brassbob.core.audit;
 
 import static org.brassbob.core.audit.Findings.show;
 
+import java.util.Arrays;
 import java.util.function.ToDoubleFunction;
 import org.brassbob.core.geometry.Attitude;
 import org.brassbob.core.geometry.Bounds;
@@ -19,6 +20,11 @@ final class VolumeCheck {
 
     /** What a cell may be off by because volumes are rounded too: the shape's own change over half a unit of volume. */
     private static final double HALF = 0.505;
+
+    /** MSC.1/Circ.1229 section 4: centroids of compartments within 5 cm, free-surface moments within 2 %. */
+    private static final double CENTROID_TOLERANCE = 0.05;
+
+    private static final double MOMENT_TOLERANCE = 0.02;
 
     private final Tank tank;
     private final VolumeTable table;
@@ -118,17 +124,24 @@ final class VolumeCheck {
     }
 
     private void againstItself() {
-        series("lcg_m", column(Entry::lcg));
-        series("tcg_m", column(Entry::tcg));
-        series("vcg_m", column(Entry::vcg));
-        series("fs_m4", column(Entry::secondMoment));
+        series("lcg_m", column(Entry::lcg), CENTROID_TOLERANCE);
+        series("tcg_m", column(Entry::tcg), CENTROID_TOLERANCE);
+        series("vcg_m", column(Entry::vcg), CENTROID_TOLERANCE);
+        double[] moments = column(Entry::secondMoment);
+        series("fs_m4", moments, MOMENT_TOLERANCE * Arrays.stream(moments).max().orElse(0));
     }
 
-    private void series(String name, double[] column) {
+    private void series(String name, double[] column, double tolerance) {
         double[] errors = Series.errors(volumes, column);
         for (int i = 0; i < errors.length; i++) {
             if (errors[i] != 0) {
-                report(i, name + " out of line with its neighbours", column[i], "about " + show(column[i] - errors[i]));
+                findings.doubt(
+                        Math.abs(errors[i]) > tolerance,
+                        table.origin(),
+                        i,
+                        name + " out of line with its neighbours in " + tank.id(),
+                        show(column[i]),
+                        "about " + show(column[i] - errors[i]));
             }
         }
     }

@@ -120,7 +120,10 @@ public final class Assessor {
             notices.add(Notice.of(NoticeCode.NOT_SETTLED, "ship", settled.trim(), settled.listDeg()));
         }
         if (!maker.covers(condition.displacement())) {
-            notices.add(Notice.of(NoticeCode.OUTSIDE_HYDROSTATICS_EDGE, "ship", condition.displacement()));
+            NoticeCode code = maker.hullCovers(condition.displacement())
+                    ? NoticeCode.OUTSIDE_HYDROSTATICS_HULL
+                    : NoticeCode.OUTSIDE_HYDROSTATICS_EDGE;
+            notices.add(Notice.of(code, "ship", condition.displacement()));
         }
         if (!flotation.coversTrim(condition.trim())) {
             notices.add(Notice.of(NoticeCode.TRIM_OUTSIDE_HYDROSTATICS, "ship", condition.trim()));

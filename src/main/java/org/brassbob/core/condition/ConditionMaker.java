@@ -23,6 +23,11 @@ final class ConditionMaker {
         return flotation.covers(displacement, seaDensity);
     }
 
+    /** Whether the hull reaches a displacement (t) that the table does not. */
+    boolean hullCovers(double displacement) {
+        return flotation.hullCovers(displacement, seaDensity);
+    }
+
     /** The corrected GM (m) alone, for looking at many levels. */
     double gm(Totals totals) {
         double trim = 0;

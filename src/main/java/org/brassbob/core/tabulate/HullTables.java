@@ -57,18 +57,22 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
             km[i] = hydrostatics.atDisplacement(displacements.value(i)).kmt();
         }
         return new HullTables(
-                hydrostatics(vessel, half),
+                hydrostatics(vessel, half, DRAUGHTS),
                 crossCurves.curves(displacements, HEELS),
                 new RequiredGm(crossCurves.curves(displacements, CLOSE_HEELS))
                         .curve("general criteria, 2008 IS Code part A 2.2", displacements, km));
     }
 
-    /** The hydrostatic table alone. */
-    public static HydrostaticTable hydrostatics(Vessel vessel, SpaceShape half) {
+    /**
+     * The hydrostatic table alone.
+     *
+     * @param rows about how many draughts at the most
+     */
+    public static HydrostaticTable hydrostatics(Vessel vessel, SpaceShape half, int rows) {
         Solid hull = bothSides(half);
         return new HydrostaticMaker(
                         hull, vessel.seaDensity(), vessel.particulars().lbp())
-                .table(draughts(hull, vessel.particulars().depth()), Axis.of(0));
+                .table(draughts(hull, vessel.particulars().depth(), rows), Axis.of(0));
     }
 
     /** The whole hull. */
@@ -80,14 +84,15 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         }
     }
 
-    /** Round draughts from the keel to the depth, or to the top of the hull where that is lower. */
-    private static Axis draughts(Solid hull, double mouldedDepth) {
+    /** Round draughts between the keel and the depth, or the top of the hull where that is lower. */
+    private static Axis draughts(Solid hull, double mouldedDepth, int rows) {
         double keel = hull.bounds().minZ();
         double top = hull.bounds().maxZ();
         double depth = mouldedDepth > keel ? Math.min(mouldedDepth, top) : top;
-        double step = RoundSteps.atLeast((depth - Math.max(0, keel)) / DRAUGHTS);
+        double step = RoundSteps.atLeast((depth - Math.max(0, keel)) / rows);
         int first = (int) Math.floor(Math.max(0, keel) / step) + 1;
-        int last = (int) Math.floor(depth / step + 1e-9);
+        // At the deck there is no waterplane left: the last row stands below it.
+        int last = (int) Math.ceil(depth / step - 1e-9) - 1;
         double[] draughts = new double[last - first + 1];
         for (int i = 0; i < draughts.length; i++) {
             draughts[i] = RoundSteps.multiple(first + i, step);

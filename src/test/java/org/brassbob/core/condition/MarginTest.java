@@ -117,7 +117,7 @@ class MarginTest {
         Exception e = assertThrows(
                 IllegalArgumentException.class,
                 () -> ShipBuilder.ship().hydrostatics(null).assessor());
-        assertEquals("vessel test has no hydrostatic table", e.getMessage());
+        assertEquals("vessel test has neither hydrostatic table nor hull shape", e.getMessage());
     }
 
     @Test
