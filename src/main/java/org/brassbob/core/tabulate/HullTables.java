@@ -84,7 +84,7 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         }
     }
 
-    /** Round draughts from the keel to the depth, or to the top of the hull where that is lower. */
+    /** Round draughts between the keel and the depth, or the top of the hull where that is lower. */
     private static Axis draughts(Solid hull, double mouldedDepth, int rows) {
         double keel = hull.bounds().minZ();
         double top = hull.bounds().maxZ();

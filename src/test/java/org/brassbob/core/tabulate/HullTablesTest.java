@@ -85,7 +85,7 @@ class HullTablesTest {
             assertEquals(1.025 * 720 / 100, e.tpc(), 1e-9);
             previous = e.displacement();
         }
-        assertTrue(tables.hydrostatics().rows(0).draughts().last() <= hullDepth);
+        assertTrue(tables.hydrostatics().rows(0).draughts().last() < hullDepth);
         Axis displacements = tables.crossCurves().displacements();
         assertTrue(displacements.size() >= 2);
         assertTrue(displacements.last() < 1.025 * 720 * hullDepth);
@@ -104,7 +104,7 @@ class HullTablesTest {
         assertTrue(tables.crossCurves().displacements().last() >= 1.05 * 1.025 * 720 * 3.5);
     }
 
-    /** A forecastle above the moulded depth: the table ends at the depth. */
+    /** A forecastle above the moulded depth: the table ends short of the depth. */
     @Test
     void aForecastleDoesNotLengthenTheTable() {
         SpaceShape hull = Shapes.shape(
@@ -113,7 +113,8 @@ class HullTablesTest {
                 Shapes.station(50, Shapes.rectangle(1, 0, 6, 0, 8)),
                 Shapes.station(LENGTH, Shapes.rectangle(1, 0, 6, 0, 8)));
         HullTables tables = HullTables.of(ship(800, 3.5, 5), hull);
-        assertEquals(5, tables.hydrostatics().rows(0).draughts().last());
+        double last = tables.hydrostatics().rows(0).draughts().last();
+        assertTrue(last < 5 && last > 4.6, () -> "last " + last);
     }
 
     /**
