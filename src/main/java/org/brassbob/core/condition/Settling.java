@@ -130,17 +130,34 @@ final class Settling {
         for (Weight weight : vessel.weights()) {
             totals.add(weight.at());
         }
-        List<TankLoad> open = new ArrayList<>();
         for (TankLoad load : loads) {
             load.read(trim, listDeg);
             totals.add(load, 1);
-            if (load.range().isInterval()) {
+        }
+        List<TankLoad> open = new ArrayList<>();
+        for (TankLoad load : loads) {
+            if (load.intervalMatters()) {
                 open.add(load);
+            } else if (load.range().isInterval()) {
+                takeWorseEnd(load, totals, trim);
             }
         }
         if (!open.isEmpty()) {
             WorstLevels.choose(open, totals, maker::gm, trim);
         }
         return totals;
+    }
+
+    /** Between two ends that both count as empty there is only a little mass to choose, and nothing for other tanks to wait for. */
+    private void takeWorseEnd(TankLoad load, Totals totals, double trim) {
+        double atLow = maker.gm(totals);
+        totals.add(load, -1);
+        load.fill(load.range().high(), trim);
+        totals.add(load, 1);
+        if (maker.gm(totals) > atLow) {
+            totals.add(load, -1);
+            load.fill(load.range().low(), trim);
+            totals.add(load, 1);
+        }
     }
 }
