@@ -91,8 +91,8 @@ public record HullTables(HydrostaticTable hydrostatics, CrossCurves crossCurves,
         double depth = mouldedDepth > keel ? Math.min(mouldedDepth, top) : top;
         double step = RoundSteps.atLeast((depth - Math.max(0, keel)) / rows);
         int first = (int) Math.floor(Math.max(0, keel) / step) + 1;
-        // At the top of the hull there is no waterplane left: the last row stands below it.
-        int last = depth < top ? (int) Math.floor(depth / step + 1e-9) : (int) Math.ceil(top / step - 1e-9) - 1;
+        // At the deck the waterplane goes under: the last row stands below it.
+        int last = (int) Math.ceil(depth / step - 1e-9) - 1;
         double[] draughts = new double[last - first + 1];
         for (int i = 0; i < draughts.length; i++) {
             draughts[i] = RoundSteps.multiple(first + i, step);
