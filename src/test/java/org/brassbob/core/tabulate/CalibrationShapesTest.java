@@ -95,6 +95,14 @@ class CalibrationShapesTest {
         assertEquals(3.2, inside.last());
     }
 
+    /** A pipe that begins above the tank reads nothing but dry: one row, of a tank that is full. */
+    @Test
+    void aPipeAboveTheTankHasOneRow() {
+        SoundingTable table = table(BOX, new Pipe(11, 2, 6, 2), Gauge.SOUNDING, CalibrationGrid.USUAL);
+        assertEquals(1, table.readings().size());
+        assertEquals(288, table.volume(0, 0, 0), 1e-9);
+    }
+
     /** An ullage is measured from the rim: the reading l − s has the volume that the sounding s has. */
     @Test
     void ullages() {
