@@ -50,31 +50,31 @@ final class Row {
 
     /** A number within a range; NaN, with a fault, where there is none. */
     double number(String column, double low, double high) {
-        if (text(column).isEmpty()) {
+        String text = text(column);
+        if (text.isEmpty()) {
             problem(column + " is empty; expected a number");
             return Double.NaN;
         }
-        Double value = optional(column, low, high);
-        return value == null ? Double.NaN : value;
+        return within(column, text, low, high);
+    }
+
+    private double within(String column, String text, double low, double high) {
+        double value = Numbers.parse(text);
+        if (Double.isNaN(value)) {
+            problem(column + " is " + Numbers.shown(text) + "; expected a number" + Numbers.hint(text));
+        } else if (value < low || value > high) {
+            problem(column + " is " + text + "; expected " + plain(low) + " to " + plain(high));
+            return Double.NaN;
+        }
+        return value;
     }
 
     /** A number within a range where the cell gives one; null otherwise, with a fault where it is no such number. */
     @Nullable
     Double optional(String column, double low, double high) {
         String text = text(column);
-        if (text.isEmpty()) {
-            return null;
-        }
-        double value = Numbers.parse(text);
-        if (Double.isNaN(value)) {
-            problem(column + " is " + Numbers.shown(text) + "; expected a number" + Numbers.hint(text));
-            return null;
-        }
-        if (value < low || value > high) {
-            problem(column + " is " + text + "; expected " + plain(low) + " to " + plain(high));
-            return null;
-        }
-        return value;
+        double value = text.isEmpty() ? Double.NaN : within(column, text, low, high);
+        return Double.isNaN(value) ? null : value;
     }
 
     double optional(String column, double low, double high, double otherwise) {

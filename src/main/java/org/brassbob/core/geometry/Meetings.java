@@ -17,6 +17,9 @@ final class Meetings {
     /** Below this share of its terms an expression is nought. */
     private static final double ROUNDING = 1e-12;
 
+    /** How much further than an edge's way a corner is still taken to reach it (share of the way's size). */
+    private static final double BOX_MARGIN = 1e-9;
+
     private final TreeSet<Double> shares = new TreeSet<>();
 
     private Meetings() {}
@@ -48,12 +51,15 @@ final class Meetings {
     }
 
     private void find(Strip corners, Strip edges) {
+        if (isStill(corners) && isStill(edges)) {
+            return;
+        }
         int n = edges.aft().size();
         for (int c = 0; c < corners.aft().size(); c++) {
             for (int e = 0; e < n; e++) {
                 int f = (e + 1) % n;
                 boolean own = corners.number() == edges.number() && (c == e || c == f);
-                if (!own) {
+                if (!own && reach(corners, c, edges, e, f)) {
                     find(
                             new Path(corners.aft().get(c), corners.forward().get(c)),
                             new Path(edges.aft().get(e), edges.forward().get(e)),
@@ -61,6 +67,29 @@ final class Meetings {
                 }
             }
         }
+    }
+
+    private static boolean isStill(Strip strip) {
+        return strip.aft().equals(strip.forward());
+    }
+
+    /** Whether the box about a corner's way and the one about an edge's way have anything in common: most have not. */
+    private static boolean reach(Strip corners, int c, Strip edges, int e, int f) {
+        Point aft = corners.aft().get(c);
+        Point forward = corners.forward().get(c);
+        Point p = edges.aft().get(e);
+        Point q = edges.aft().get(f);
+        Point r = edges.forward().get(e);
+        Point s = edges.forward().get(f);
+        return overlap(aft.y(), forward.y(), p.y(), q.y(), r.y(), s.y())
+                && overlap(aft.z(), forward.z(), p.z(), q.z(), r.z(), s.z());
+    }
+
+    private static boolean overlap(double a, double b, double p, double q, double r, double s) {
+        double low = Math.min(Math.min(p, q), Math.min(r, s));
+        double high = Math.max(Math.max(p, q), Math.max(r, s));
+        double margin = BOX_MARGIN * (high - low);
+        return Math.max(a, b) >= low - margin && Math.min(a, b) <= high + margin;
     }
 
     private void find(Path corner, Path start, Path end) {
