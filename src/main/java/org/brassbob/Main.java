@@ -14,12 +14,28 @@ public final class Main {
     private static final List<String> DEMO =
             List.of("assess", "vessel-data/heron", "--round", "vessel-data/heron/rounds/departure.csv");
 
+    /** As where the input can't be used: nothing that was printed may be relied on. */
+    private static final int FAULT = 2;
+
     private Main() {}
 
     /** Runs the call that the arguments name; without any, the demo ship's round in the terminal. */
     public static void main(String[] args) {
         List<String> call = args.length == 0 ? DEMO : List.of(args);
-        System.exit(Cli.run(call, writer(System.out), writer(System.err)));
+        System.exit(run(call, writer(System.out), writer(System.err)));
+    }
+
+    /** A fault of the program itself is told in a line like any other, and where it arose for whoever mends it. */
+    private static int run(List<String> call, PrintWriter out, PrintWriter err) {
+        try {
+            return Cli.run(call, out, err);
+        } catch (RuntimeException | OutOfMemoryError | StackOverflowError e) {
+            StackTraceElement[] trace = e.getStackTrace();
+            err.println("brassbob: a fault in the program itself, please report it: " + e
+                    + (trace.length > 0 ? " at " + trace[0] : ""));
+            err.flush();
+            return FAULT;
+        }
     }
 
     private static PrintWriter writer(PrintStream stream) {

@@ -2,6 +2,7 @@
 package org.brassbob.data;
 
 import java.io.IOException;
+import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -35,9 +36,21 @@ public final class DiskFolder implements FolderSource {
         if (!Files.isRegularFile(file)) {
             return Optional.empty();
         }
-        if (Files.size(file) > LARGEST_FILE) {
-            throw new IOException("larger than " + LARGEST_FILE / (1024 * 1024) + " MB");
+        return Optional.of(content(file));
+    }
+
+    /**
+     * The content of a file, or of anything else that can be read to an end.
+     *
+     * @throws IOException if it can't be read, or is larger than {@link #LARGEST_FILE}; a device without end is only read so far
+     */
+    static byte[] content(Path file) throws IOException {
+        try (InputStream in = Files.newInputStream(file)) {
+            byte[] bytes = in.readNBytes(LARGEST_FILE + 1);
+            if (bytes.length > LARGEST_FILE) {
+                throw new IOException("larger than " + LARGEST_FILE / (1024 * 1024) + " MB");
+            }
+            return bytes;
         }
-        return Optional.of(Files.readAllBytes(file));
     }
 }

@@ -2,7 +2,6 @@
 package org.brassbob.data;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.OffsetDateTime;
 import java.time.format.DateTimeParseException;
@@ -42,10 +41,7 @@ public final class RoundFile {
     public static Loaded<SoundingRound> read(Path path, Vessel vessel) {
         String file = path.toString();
         try {
-            if (Files.size(path) > FolderSource.LARGEST_FILE) {
-                return unreadable(file);
-            }
-            return read(file, Files.readAllBytes(path), vessel);
+            return read(file, DiskFolder.content(path), vessel);
         } catch (IOException e) {
             return unreadable(file);
         }

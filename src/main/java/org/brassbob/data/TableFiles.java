@@ -152,7 +152,16 @@ public final class TableFiles {
         Path parent = target.getParent();
         Files.createDirectories(parent == null ? folder : parent);
         Path whole = target.resolveSibling(target.getFileName() + ".new");
-        Files.writeString(whole, text.toString(), StandardCharsets.UTF_8);
+        try {
+            Files.writeString(whole, text.toString(), StandardCharsets.UTF_8);
+            move(whole, target);
+        } finally {
+            // Gone once it is moved; left over where the disk was full or the target can't be replaced.
+            Files.deleteIfExists(whole);
+        }
+    }
+
+    private static void move(Path whole, Path target) throws IOException {
         try {
             Files.move(whole, target, StandardCopyOption.ATOMIC_MOVE);
         } catch (AtomicMoveNotSupportedException e) {

@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import org.brassbob.core.vessel.Tank;
 import org.brassbob.core.vessel.Vessel;
 import org.brassbob.data.VesselFolder;
@@ -141,5 +142,34 @@ class CliTest {
         assertEquals(ExitStatus.UNUSABLE, call.status());
         assertEquals(1, call.errorLines().size(), call.err());
         assertTrue(call.err().startsWith(file + ":1: can't be written"), call.err());
+    }
+
+    @Test
+    void whatCantBeReplacedLeavesNothingBehind() throws IOException {
+        Path inTheWay = folder.resolve("made/tanks/hyd.volume.csv");
+        Files.createDirectories(inTheWay.resolve("full"));
+        Call call = Call.of(
+                "tabulate",
+                HERON,
+                "--tank",
+                "hyd",
+                "--into",
+                folder.resolve("made").toString());
+        assertEquals(ExitStatus.UNUSABLE, call.status());
+        assertEquals(1, call.errorLines().size(), call.err());
+        try (var files = Files.list(folder.resolve("made/tanks"))) {
+            assertEquals(
+                    List.of("hyd.sounding.csv", "hyd.volume.csv"),
+                    files.map(f -> f.getFileName().toString()).sorted().toList());
+        }
+    }
+
+    @Test
+    void aDeviceWithoutEndIsNoRound() {
+        Path endless = Path.of("/dev/zero");
+        org.junit.jupiter.api.Assumptions.assumeTrue(Files.exists(endless));
+        Call call = Call.of("assess", HERON, "--round", endless.toString());
+        assertEquals(ExitStatus.UNUSABLE, call.status());
+        assertEquals(1, call.errorLines().size(), call.err());
     }
 }
