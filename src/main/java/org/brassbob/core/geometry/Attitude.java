@@ -39,11 +39,6 @@ public record Attitude(double trimSlope, double heelSlope) {
         return new Attitude(trim / lbp, Math.tan(Math.toRadians(heelDeg)));
     }
 
-    /** The same trim without the heel. */
-    public Attitude withoutHeel() {
-        return heelSlope == 0 ? this : new Attitude(trimSlope, 0);
-    }
-
     /** The height z0 (at x = y = 0) of the surface with this attitude through a point. */
     public double heightThrough(double x, double y, double z) {
         return z + x * trimSlope - y * heelSlope;
