@@ -19,6 +19,8 @@ final class Entries {
             START,
             new RoundDraft.Sight(new Observed(0.1, 0.5, 1.02, null, null), Conditions.AT_SEA, "intact"));
 
+    static final Origin NOWHERE = Origin.computed("test");
+
     private Entries() {}
 
     static ReadingDraft sounding(String tank, double metres, OffsetDateTime at) {

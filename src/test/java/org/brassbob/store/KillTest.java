@@ -12,6 +12,7 @@ import java.nio.file.Path;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Random;
 import java.util.concurrent.Callable;
 import java.util.concurrent.ExecutorService;
@@ -42,7 +43,7 @@ class KillTest {
         }
 
         void killOnce() throws IOException, InterruptedException {
-            Process child = start();
+            Process child = start(folder, next);
             try (BufferedReader out = child.inputReader(StandardCharsets.UTF_8)) {
                 int lines = random.nextInt(25);
                 for (int i = 0; i < lines; i++) {
@@ -58,23 +59,6 @@ class KillTest {
             }
             assertEquals(128 + 9, child.exitValue(), "the child ended by itself");
             check();
-        }
-
-        private Process start() throws IOException {
-            return new ProcessBuilder(
-                            Path.of(System.getProperty("java.home"), "bin", "java")
-                                    .toString(),
-                            "-Xshare:auto",
-                            "-XX:TieredStopAtLevel=1",
-                            "-XX:+UseSerialGC",
-                            "-Xmx64m",
-                            "-cp",
-                            classPath(),
-                            AcceptingChild.class.getName(),
-                            folder.toString(),
-                            Integer.toString(next))
-                    .redirectError(ProcessBuilder.Redirect.INHERIT)
-                    .start();
         }
 
         private void promise(String line) {
@@ -109,6 +93,39 @@ class KillTest {
                 promised.putAll(found);
             }
         }
+    }
+
+    private static Process start(Path folder, int next) throws IOException {
+        return new ProcessBuilder(
+                        Path.of(System.getProperty("java.home"), "bin", "java").toString(),
+                        "-Xshare:auto",
+                        "-XX:TieredStopAtLevel=1",
+                        "-XX:+UseSerialGC",
+                        "-Xmx64m",
+                        "-cp",
+                        classPath(),
+                        AcceptingChild.class.getName(),
+                        folder.toString(),
+                        Integer.toString(next))
+                .redirectError(ProcessBuilder.Redirect.INHERIT)
+                .start();
+    }
+
+    @Test
+    void secondProcessIsTurnedAwayUntilTheFirstEnds() throws Exception {
+        Process first = start(folder, 1);
+        try (BufferedReader out = first.inputReader(StandardCharsets.UTF_8)) {
+            out.readLine();
+            Opened second = Store.open(folder);
+            assertEquals(Optional.empty(), second.opened());
+            assertTrue(second.message().contains("another Brassbob"), second.message());
+            assertTrue(out.readLine().endsWith(" ok"), "the first goes on");
+        } finally {
+            first.destroyForcibly().waitFor();
+        }
+        Opened after = Store.open(folder);
+        assertEquals("", after.message());
+        after.opened().orElseThrow().close();
     }
 
     private static String classPath() {
