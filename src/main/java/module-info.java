@@ -6,4 +6,6 @@ module org.brassbob {
     requires com.fasterxml.jackson.core;
     requires de.siegmar.fastcsv;
     requires info.picocli;
+    requires java.sql;
+    requires org.xerial.sqlitejdbc;
 }

@@ -139,6 +139,25 @@ class LayersTest {
         keep("com.fasterxml..", "org.brassbob.data..", "org.brassbob.cli..");
         keep("javafx..", "org.brassbob.ui..", "org.brassbob.app..");
         keep("java.sql..", "org.brassbob.store..");
+        keep("javax.sql..", "org.brassbob.store..");
+        keep("org.sqlite..", "org.brassbob.store..");
+    }
+
+    @Test
+    void storeKnowsNoScreensNoCommandsNoFiles() {
+        noClasses()
+                .that()
+                .resideInAPackage("org.brassbob.store..")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage(
+                        "javafx..",
+                        "org.brassbob.ui..",
+                        "org.brassbob.app..",
+                        "org.brassbob.cli..",
+                        "org.brassbob.data..")
+                .because("records outlive every screen and every file format")
+                .check(Classes.MAIN);
     }
 
     private static void keep(String library, String... places) {
