@@ -20,17 +20,33 @@ final class CapacityCheck {
     private CapacityCheck() {}
 
     static void check(Tank tank, @Nullable NetShape shape, Findings findings) {
+        boolean shapeAgrees = false;
         if (shape != null) {
             compare(tank, shape.capacity(), "the shape's net volume", findings);
+            shapeAgrees = Math.abs(tank.capacity() - shape.capacity()) <= usual(shape.capacity());
         }
         VolumeTable volumes = tank.volumes();
         if (volumes != null) {
+            int last = volumes.volumes().size() - 1;
             compare(tank, volumes.volumes().last(), "the last row of the volume table", findings);
+            if (shapeAgrees && Math.abs(tank.capacity() - volumes.volumes().last()) > usual(tank.capacity())) {
+                // Plan and shape are of one mind: it is the table that is wrong.
+                findings.error(
+                        volumes.origin(),
+                        last,
+                        "last volume of " + tank.id() + " against capacity and shape",
+                        show(volumes.volumes().last()) + " m3",
+                        show(tank.capacity()) + " m3");
+            }
         }
         SoundingTable soundings = tank.soundings();
         if (soundings != null) {
             compare(tank, greatest(soundings), "the greatest volume of the sounding table", findings);
         }
+    }
+
+    private static double usual(double volume) {
+        return Math.max(0.011, USUAL * volume);
     }
 
     private static double greatest(SoundingTable table) {
@@ -45,8 +61,7 @@ final class CapacityCheck {
 
     private static void compare(Tank tank, double other, String what, Findings findings) {
         double difference = Math.abs(tank.capacity() - other);
-        double tolerance = Math.max(0.011, USUAL * other);
-        if (difference <= tolerance) {
+        if (difference <= usual(other)) {
             return;
         }
         String text = "capacity of " + tank.id() + " against " + what;

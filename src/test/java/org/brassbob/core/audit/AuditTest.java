@@ -132,6 +132,19 @@ class AuditTest {
                 "tanks/dt1-c.sounding.csv:2: error: the whole table of dt1-c against the shape:");
     }
 
+    /** Where plan and shape agree, it is the table's last volume that is wrong, and the finding stands there. */
+    @Test
+    void aLastVolumeAgainstCapacityAndShapeIsFoundInTheTable() {
+        List<String> lines = HERON.text("tanks/hyd.volume.csv").lines().toList();
+        String last = lines.get(lines.size() - 1);
+        String typed = last.replaceFirst("^3", "4");
+        assertFound(
+                findings(HERON.with(
+                        "tanks/hyd.volume.csv",
+                        HERON.text("tanks/hyd.volume.csv").replace(last, typed))),
+                "tanks/hyd.volume.csv:" + lines.size() + ": error: last volume of hyd against capacity and shape: 4.2");
+    }
+
     @Test
     void aRoughTableIsHeldToItsOwnRoughness() {
         // A booklet's table, good to a few litres: no cell stands out, and none is reported.

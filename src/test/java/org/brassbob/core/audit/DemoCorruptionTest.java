@@ -38,7 +38,7 @@ class DemoCorruptionTest {
     @ParameterizedTest
     @CsvSource({
         ".sounding.csv, volume_m3, 1.0",
-        ".volume.csv, volume_m3, 0.8",
+        ".volume.csv, volume_m3, 1.0",
         ".volume.csv, lcg_m, 1.0",
         ".volume.csv, tcg_m, 1.0",
         ".volume.csv, vcg_m, 1.0",
